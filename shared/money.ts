@@ -1,0 +1,31 @@
+/** Whole US cents. Never a fraction; never a float of dollars. */
+export type Cents = number;
+
+const NBSP = ' ';
+
+/** "$1,840", or "$17.50" when there are cents. Minus is a real minus sign. */
+export function dollars(cents: Cents): string {
+  const whole = Math.abs(cents) % 100 === 0;
+  const text = (Math.abs(cents) / 100).toLocaleString('en-US', {
+    minimumFractionDigits: whole ? 0 : 2,
+    maximumFractionDigits: whole ? 0 : 2,
+  });
+  return `${cents < 0 ? '−' : ''}$${text}`;
+}
+
+/** "$1,640 – $2,080"; one number when both ends are the same. */
+export const dollarRange = (lowCents: Cents, highCents: Cents): string =>
+  lowCents === highCents ? dollars(lowCents) : `${dollars(lowCents)}${NBSP}–${NBSP}${dollars(highCents)}`;
+
+/** "1,640 to 2,080 dollars", for screen readers. */
+export const spokenRange = (lowCents: Cents, highCents: Cents): string => {
+  const plain = (cents: Cents) => (cents / 100).toLocaleString('en-US', { maximumFractionDigits: 0 });
+  return lowCents === highCents ? `${plain(lowCents)} dollars` : `${plain(lowCents)} to ${plain(highCents)} dollars`;
+};
+
+/** "+$105", "−$60", "same". */
+export const dollarChange = (cents: Cents): string => (cents === 0 ? 'same' : cents > 0 ? `+${dollars(cents)}` : dollars(cents));
+
+/** Nearest multiple, halves away from zero; `stepCents` 1,000 gives whole ten dollars. */
+export const roundCents = (cents: number, stepCents: Cents): Cents =>
+  Math.sign(cents) * Math.round(Math.abs(cents) / stepCents) * stepCents || 0;
