@@ -1,7 +1,7 @@
 /** Whole US cents. Never a fraction; never a float of dollars. */
 export type Cents = number;
 
-const NBSP = ' ';
+const NBSP = '\u00a0';
 
 /** "$1,840", or "$17.50" when there are cents. Minus is a real minus sign. */
 export function dollars(cents: Cents): string {

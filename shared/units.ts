@@ -1,5 +1,8 @@
 /** Joins a number and its unit so that they never part at a line's end. */
-const NBSP = ' ';
+const NBSP = '\u00a0';
+
+/** Puts a no-break space between every number and its unit in a text. */
+export const keepUnits = (text: string): string => text.replace(/(\d) (A|V|kW|ft|in\.|AWG|sq ft|miles|hours|steps)(?![a-z])/g, `$1${NBSP}$2`);
 
 /** "9 ft 6 in." for 9.5; "9 ft" for 9. Rounded to the nearest inch. */
 export function feetInWords(lengthFt: number): string {

@@ -1,3 +1,4 @@
+import { keepUnits } from '../units';
 import { z } from '../zod';
 
 /** The answer "Not sure". It never blocks; it widens the range. */
@@ -98,11 +99,13 @@ const withUnsure = (schema: z.ZodType, common: Common): z.ZodType => (common.uns
 
 /** One of several. */
 export function choice(common: Common & { choices: readonly Choice[]; columns?: 1 | 2 | 3 }): ChoiceField {
-  const labels = new Map(common.choices.map((entry) => [entry.value, entry.label]));
+  const choices = common.choices.map((entry) => ({ ...entry, label: keepUnits(entry.label), ...(entry.note ? { note: keepUnits(entry.note) } : {}) }));
+  const labels = new Map(choices.map((entry) => [entry.value, entry.label]));
   return {
     ...common,
+    choices,
     kind: 'choice',
-    schema: withUnsure(z.enum(common.choices.map((entry) => entry.value) as [string, ...string[]], { error: 'Pick one of these' }), common),
+    schema: withUnsure(z.enum(choices.map((entry) => entry.value) as [string, ...string[]], { error: 'Pick one of these' }), common),
     words: (value) => (value === UNSURE ? UNSURE_WORDS : (labels.get(String(value)) ?? '')),
   };
 }
@@ -132,7 +135,7 @@ export function number(common: Common & Pick<NumberField, 'unit' | 'min' | 'max'
     ...common,
     kind: 'number',
     schema: withUnsure(schema, common),
-    words: (value) => (typeof value === 'number' ? `${value.toLocaleString('en-US')} ${unit}` : UNSURE_WORDS),
+    words: (value) => (typeof value === 'number' ? `${value.toLocaleString('en-US')}\u00a0${unit}` : UNSURE_WORDS),
   };
 }
 
