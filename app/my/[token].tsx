@@ -1,0 +1,1 @@
+export { MyLinkScreen as default } from '../../components/my/my-link-screen';

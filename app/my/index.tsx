@@ -1,0 +1,1 @@
+export { MyScreen as default } from '../../components/my/my-screen';

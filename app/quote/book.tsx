@@ -1,0 +1,1 @@
+export { BookScreen as default } from '../../components/price/book-screen';

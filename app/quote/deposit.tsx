@@ -1,0 +1,1 @@
+export { DepositScreen as default } from '../../components/price/deposit-screen';

@@ -1,0 +1,1 @@
+export { PriceScreen as default } from '../../components/price/price-screen';

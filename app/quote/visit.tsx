@@ -1,0 +1,1 @@
+export { VisitScreen as default } from '../../components/price/visit-screen';
