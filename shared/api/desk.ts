@@ -45,6 +45,8 @@ export const leadSchema = leadRowSchema.extend({
   /** Answers that were changed after the price was frozen or paid, in words. */
   differences: z.array(z.object({ label: z.string(), before: z.string(), after: z.string() })),
   history: z.array(historyEntrySchema),
+  /** Stages to which the person who asks may move it now; the controls show these and no others. */
+  moves: z.array(z.enum(leadStages)),
 });
 export type Lead = z.infer<typeof leadSchema>;
 

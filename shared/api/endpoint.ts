@@ -24,6 +24,8 @@ export interface Endpoint<
   readonly idempotent: boolean;
   /** 'json' unless the body is a form with a file. */
   readonly bodyType: 'json' | 'multipart' | 'raw';
+  /** 'json' unless the answer is a picture. */
+  readonly responseType: 'json' | 'image';
 }
 
 type Part = z.ZodType | undefined;
@@ -31,11 +33,11 @@ type Part = z.ZodType | undefined;
 /** Declares one endpoint: the server validates by it, OpenAPI is made from it, the browser's hooks are typed by it. */
 export function endpoint<P extends Part = undefined, Q extends Part = undefined, B extends Part = undefined, R extends Part = undefined>(
   declaration: Pick<Endpoint, 'method' | 'path' | 'summary'> & {
-    access?: readonly Access[]; params?: P; query?: Q; body?: B; response?: R; status?: number; idempotent?: boolean; bodyType?: Endpoint['bodyType'];
+    access?: readonly Access[]; params?: P; query?: Q; body?: B; response?: R; status?: number; idempotent?: boolean; bodyType?: Endpoint['bodyType']; responseType?: Endpoint['responseType'];
   },
 ): Endpoint<P, Q, B, R> {
   return {
-    access: ['public'], status: declaration.response === undefined ? 204 : 200, idempotent: false, bodyType: 'json', ...declaration,
+    access: ['public'], status: declaration.response === undefined ? 204 : 200, idempotent: false, bodyType: 'json', responseType: 'json', ...declaration,
     params: declaration.params as P, query: declaration.query as Q, body: declaration.body as B, response: declaration.response as R,
   };
 }

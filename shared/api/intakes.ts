@@ -56,14 +56,16 @@ export const answersPatchSchema = z.object({
   }
 });
 
-export const startIntake = endpoint({ method: 'post', path: '/intakes', summary: 'Starts an intake, or returns the one this browser holds; sets its cookie', response: intakeSchema, status: 200 });
+export const startIntake = endpoint({ method: 'post', path: '/intakes', summary: 'Starts an intake, or returns the one this browser holds; sets its cookie', access: ['public', 'intake'], response: intakeSchema });
 export const getIntake = endpoint({ method: 'get', path: '/intakes/current', summary: 'The intake this browser holds', access: ['intake'], response: intakeSchema });
 export const saveAnswers = endpoint({ method: 'patch', path: '/intakes/current/answers', summary: 'Saves answers field by field and returns the range that follows', access: ['intake'], body: answersPatchSchema, response: intakeSchema });
-export const finishLater = endpoint({ method: 'post', path: '/intakes/current/finish-later', summary: 'Mails a link that resumes on any device', access: ['intake'], body: z.object({ email: emailSchema }), idempotent: true });
+export const finishLater = endpoint({ method: 'post', path: '/intakes/current/finish-later', summary: 'Mails a link that resumes on any device', access: ['intake'], body: z.object({ email: emailSchema }), idempotent: true,
+  /** The masked address, and the day (ISO) until which the link opens the answers. */
+  response: z.object({ sentTo: z.string(), openUntil: z.string() }) });
 export const resumeIntake = endpoint({ method: 'post', path: '/resume', summary: 'Opens an intake by its mailed link; sets the cookie', body: z.object({ token: z.string().max(200) }), response: intakeSchema });
 export const forgetIntake = endpoint({ method: 'delete', path: '/intakes/current', summary: 'Ends this browser’s hold on the intake; the answers stay for who has the link', access: ['intake'] });
 export const askForVisit = endpoint({ method: 'post', path: '/intakes/current/visit', summary: 'Hands the intake to the estimator without a price', access: ['intake'], body: contactSchema, response: intakeSchema, idempotent: true });
 
 export const addPhoto = endpoint({ method: 'post', path: '/intakes/current/photos', summary: 'Stores a picture (form field “photo”, with “slot”), re-encoded without metadata', access: ['intake'], bodyType: 'multipart', body: z.object({ slot: z.enum(photoSlotIds) }), response: photoSchema, status: 201 });
 export const removePhoto = endpoint({ method: 'delete', path: '/intakes/current/photos/{id}', summary: 'Takes a picture back', access: ['intake'], params: z.object({ id: z.uuid() }) });
-export const getPhoto = endpoint({ method: 'get', path: '/photos/{id}/{size}', summary: 'A stored picture; only for who may see its intake', access: ['intake', 'homeowner', 'desk'], params: z.object({ id: z.uuid(), size: z.enum(['thumb', 'full']) }) });
+export const getPhoto = endpoint({ method: 'get', path: '/photos/{id}/{size}', summary: 'A stored picture; only for who may see its intake', access: ['intake', 'homeowner', 'desk'], responseType: 'image', status: 200, params: z.object({ id: z.uuid(), size: z.enum(['thumb', 'full']) }) });

@@ -59,6 +59,8 @@ export interface Group {
   readonly id: string;
   /** The screen's title: a question, or a plain statement. */
   readonly title: string;
+  /** Two or three words for "Next: blank spaces" and for the segments of the plan. */
+  readonly short: string;
   readonly hint?: string;
   /** Ids of drawings in components/drawings. */
   readonly drawing?: 'panel' | 'plan' | 'loads' | 'car';

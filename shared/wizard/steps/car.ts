@@ -9,7 +9,7 @@ export const car: Step = {
   id: 'car', number: 2, short: 'Car',
   groups: [
     {
-      id: 'rate', title: 'How fast can your car take power at home?', drawing: 'car', why: 'A faster circuit than the car can use is money for nothing.',
+      id: 'rate', title: 'How fast can your car take power at home?', short: 'charging rate', drawing: 'car', why: 'A faster circuit than the car can use is money for nothing.',
       fields: [
         choice({ id: 'carMaxAmps', label: 'Highest charging rate', name: 'Car takes', columns: 3,
           hint: 'In the owner’s manual under “AC charging” or “on-board charger”, in amps or kW.',
@@ -30,7 +30,7 @@ export const car: Step = {
       ],
     },
     {
-      id: 'days', title: 'What is a usual day?', why: 'Most cars fill up overnight on far less than the fastest circuit.',
+      id: 'days', title: 'What is a usual day?', short: 'usual day', why: 'Most cars fill up overnight on far less than the fastest circuit.',
       fields: [
         number({ id: 'milesPerDay', label: 'Miles on a usual day', name: 'Usual day', unit: 'miles', min: 1, max: 300, step: 5, start: 35, unsure: { label: 'Not sure', note: 'Fine. We take 35 miles.' } }),
         number({ id: 'hoursHome', label: 'Hours it stands at home overnight', name: 'Hours at home', unit: 'hours', min: 3, max: 24, step: 1, start: 10, unsure: { label: 'Not sure', note: 'Fine. We take 10 hours.' } }),
@@ -40,7 +40,7 @@ export const car: Step = {
       ],
     },
     {
-      id: 'charger', title: 'Whose charger will it be?',
+      id: 'charger', title: 'Whose charger will it be?', short: 'charger',
       fields: [
         choice({ id: 'chargerSupply', label: 'Do you have a charger?', name: 'Charger', columns: 2, choices: [
           { value: 'ours', label: 'No, bring one', note: 'Supplied and under our warranty' }, { value: 'theirs', label: 'Yes, I have one' },

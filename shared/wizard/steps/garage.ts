@@ -32,7 +32,7 @@ export const garageStep: Step = {
   id: 'garage', number: 5, short: 'Garage',
   groups: [
     {
-      id: 'size', title: 'How big is the garage?', hint: 'Stand at the garage door, looking in. Paces will do: one is about 2.5 ft.', drawing: 'plan', when: garage,
+      id: 'size', title: 'How big is the garage?', short: 'size', hint: 'Stand at the garage door, looking in. Paces will do: one is about 2.5 ft.', drawing: 'plan', when: garage,
       fields: [
         number({ id: 'roomWidthFt', label: 'Width, left to right', name: 'Garage width', unit: 'ft', min: 8, max: 60, step: 0.5, start: 20, unsure: sizeUnsure }),
         number({ id: 'roomDepthFt', label: 'Depth, door to back', name: 'Garage depth', unit: 'ft', min: 8, max: 60, step: 0.5, start: 22, unsure: sizeUnsure }),
@@ -41,7 +41,7 @@ export const garageStep: Step = {
       ],
     },
     {
-      id: 'panel-place', title: 'Where on the wall is the panel?', drawing: 'plan', when: panelInGarage,
+      id: 'panel-place', title: 'Where on the wall is the panel?', short: 'panel', drawing: 'plan', when: panelInGarage,
       fields: [
         choice({ id: 'panelWall', label: 'The panel is on the', name: 'Panel wall', columns: 2, choices: wallChoices, unsure: { label: 'Not sure', note: 'Fine. We allow for any wall.' } }),
         number({ id: 'panelAlongFt', label: 'How far along that wall', name: 'Panel along the wall', hint: 'From the left corner; on a side wall, from the back.', unit: 'ft', min: 0, max: 60, step: 0.5, start: 4, unsure: { label: 'Not sure', note: 'Fine. We allow for the whole wall.' } }),
@@ -49,7 +49,7 @@ export const garageStep: Step = {
       ],
     },
     {
-      id: 'charger-place', title: 'Where should the charger hang?', hint: 'Near the car’s charge port is good. Most hang at 45 in.', drawing: 'plan', when: garage,
+      id: 'charger-place', title: 'Where should the charger hang?', short: 'charger', hint: 'Near the car’s charge port is good. Most hang at 45 in.', drawing: 'plan', when: garage,
       fields: [
         choice({ id: 'chargerWall', label: 'On the', name: 'Charger wall', columns: 2, choices: wallChoices, unsure: { label: 'Not sure', note: 'Fine. We take the wall nearest the charge port.' } }),
         number({ id: 'chargerAlongFt', label: 'How far along that wall', name: 'Charger along the wall', hint: 'From the left corner; on a side wall, from the back.', unit: 'ft', min: 0, max: 60, step: 0.5, start: 9, unsure: { label: 'Not sure', note: 'Fine. We allow for the whole wall.' } }),
@@ -57,7 +57,7 @@ export const garageStep: Step = {
       ],
     },
     {
-      id: 'car-place', title: 'How does the car stand?', drawing: 'plan', when: garage,
+      id: 'car-place', title: 'How does the car stand?', short: 'car', drawing: 'plan', when: garage,
       fields: [
         choice({ id: 'carParked', label: 'You park', name: 'Parked', columns: 2, choices: [{ value: 'nose_in', label: 'Nose in' }, { value: 'back_in', label: 'Back in' }], unsure: { label: 'Not sure', note: 'Fine. Nose in is usual.' } }),
         choice({ id: 'portCorner', label: 'The charge port is at the car’s', name: 'Charge port', columns: 2, hint: 'As the driver sits: left is the driver’s left.',
@@ -67,21 +67,21 @@ export const garageStep: Step = {
       ],
     },
     {
-      id: 'paces', title: 'Walk from where the charger goes to the panel', hint: 'Count your steps along the way a wire could go. One step is about 2.5 ft.', when: panelBeyond,
+      id: 'paces', title: 'Walk from the garage to the panel', short: 'steps', hint: 'Start at the garage’s door to the house; outdoors, where the charger goes. Count your steps along a way that a wire could go. One is about 2.5 ft.', when: panelBeyond,
       fields: [
         number({ id: 'pacesToPanel', label: 'Steps to the panel', name: 'Steps to the panel', unit: 'steps', min: 1, max: 80, step: 1, start: 12, unsure: { label: 'Not sure', note: 'Fine. A visit or a photo of the way will tell us.', photo: 'way' } }),
         choice({ id: 'floorsBetween', label: 'Floors in between', name: 'Floors between', columns: 3, choices: [{ value: '0', label: 'Same floor' }, { value: '1', label: 'One' }, { value: '2', label: 'Two' }], unsure: { label: 'Not sure', note: 'Fine. We allow for one.' } }),
       ],
     },
     {
-      id: 'yard', title: 'What lies between house and garage?', when: detached,
+      id: 'yard', title: 'What lies between house and garage?', short: 'yard', when: detached,
       fields: [
         number({ id: 'trenchFt', label: 'Distance across the yard', name: 'Across the yard', unit: 'ft', min: 1, max: 150, step: 1, start: 30, unsure: { label: 'Not sure', note: 'Fine. We measure it when we visit.' } }),
         choice({ id: 'surfaceOver', label: 'The ground there', name: 'Ground', columns: 3, choices: [{ value: 'soil', label: 'Soil or lawn' }, { value: 'gravel', label: 'Gravel' }, { value: 'paved', label: 'Paved' }], unsure: { label: 'Not sure', note: 'Fine. We look when we visit.' } }),
       ],
     },
     {
-      id: 'finish', title: 'Walls, ways and looks',
+      id: 'finish', title: 'Walls, ways and looks', short: 'walls',
       fields: [
         choice({ id: 'wallFinish', label: 'The garage walls are mostly', name: 'Walls', columns: 3, when: garage, choices: [{ value: 'drywall', label: 'Drywall' }, { value: 'bare_studs', label: 'Bare studs' }, { value: 'masonry', label: 'Brick or block' }], unsure: { label: 'Not sure', note: 'Fine. A photo of the wall will tell us.', photo: 'wall' } }),
         choice({ id: 'atticAbove', label: 'Can someone get above the garage ceiling?', name: 'Attic above', columns: 2, when: garage, choices: yesNo, unsure: { label: 'Not sure', note: 'Fine. We allow for both.' } }),

@@ -11,9 +11,9 @@ const zip: TextField = {
 export const home: Step = {
   id: 'home', number: 1, short: 'Home',
   groups: [
-    { id: 'place', title: 'Where is the home?', why: 'The town decides the permit, its fee and the inspector.', fields: [zip] },
+    { id: 'place', title: 'Where is the home?', short: 'the place', why: 'The town decides the permit, its fee and the inspector.', fields: [zip] },
     {
-      id: 'kind', title: 'What kind of home is it?',
+      id: 'kind', title: 'What kind of home is it?', short: 'kind of home',
       fields: [
         choice({ id: 'homeKind', label: 'Kind of home', name: 'Home', columns: 2, choices: [
           { value: 'house', label: 'House' }, { value: 'town_house', label: 'Town house' },
@@ -29,7 +29,7 @@ export const home: Step = {
       ],
     },
     {
-      id: 'age', title: 'How old and how big is it?', why: 'Age hints at the panel. Size sets the load calculation.',
+      id: 'age', title: 'How old and how big is it?', short: 'age and size', why: 'Age hints at the panel. Size sets the load calculation.',
       fields: [
         choice({ id: 'yearBuilt', label: 'Roughly when was it built?', name: 'Built', columns: 2,
           unsure: { label: 'Not sure', note: 'Fine. We allow for any age.' },

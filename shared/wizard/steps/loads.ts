@@ -45,7 +45,7 @@ export function amountUnit(kind: LoadKind, amount: number): string {
 export const loads: Step = {
   id: 'loads', number: 4, short: 'Big loads',
   groups: [{
-    id: 'board', title: 'Which of these run on electricity?', hint: 'Gas ones don’t count. Tap again for “not sure”.', drawing: 'loads',
+    id: 'board', title: 'Which of these run on electricity?', short: 'big loads', hint: 'Gas ones don’t count. Tap again for “not sure”.', drawing: 'loads',
     why: 'This tells how much room the service has for a charger.', fields: [board],
   }],
   summary: (answers) => {

@@ -7,7 +7,7 @@ export const panel: Step = {
   id: 'panel', number: 3, short: 'Panel',
   groups: [
     {
-      id: 'main', title: 'What number is on your main breaker?', hint: 'It is the biggest handle, at the very top or bottom. The number is printed on it.',
+      id: 'main', title: 'What number is on your main breaker?', short: 'main breaker', hint: 'It is the biggest handle, at the very top or bottom. The number is printed on it.',
       drawing: 'panel', cautions: ['cover', 'noSwitching'], why: 'A bigger main and two blank spaces usually mean no new panel.',
       fields: [
         choice({ id: 'mainBreakerAmps', label: 'Main breaker', name: 'Main breaker', columns: 3,
@@ -20,7 +20,7 @@ export const panel: Step = {
       ],
     },
     {
-      id: 'spaces', title: 'How many blank spaces, one above another?', hint: 'A blank space has a cover plate and no handle.', cautions: ['cover'],
+      id: 'spaces', title: 'How many blank spaces, one above another?', short: 'blank spaces', hint: 'A blank space has a cover plate and no handle.', cautions: ['cover'],
       fields: [
         choice({ id: 'blankSpaces', label: 'Blank spaces', name: 'Blank spaces', columns: 3,
           unsure: { label: 'Not sure', note: 'Fine. A photo of the open door will tell us.', photo: 'panel' },
@@ -28,7 +28,7 @@ export const panel: Step = {
       ],
     },
     {
-      id: 'odd', title: 'Anything odd about the panel?', cautions: ['danger', 'screwed'], hint: 'Look and listen from where you stand. Pick all that fit.',
+      id: 'odd', title: 'Anything odd about the panel?', short: 'condition', cautions: ['danger', 'screwed'], hint: 'Look and listen from where you stand. Pick all that fit.',
       fields: [
         many({ id: 'panelCondition', label: 'What do you see or hear?', name: 'Condition', none: 'Nothing odd',
           unsure: { label: 'Not sure', note: 'Fine. A photo will tell us.', photo: 'panel' },
@@ -39,7 +39,7 @@ export const panel: Step = {
       ],
     },
     {
-      id: 'where', title: 'Where is the panel?',
+      id: 'where', title: 'Where is the panel?', short: 'where it is',
       fields: [
         choice({ id: 'panelPlace', label: 'The panel is', name: 'Panel place', columns: 2, unsure: { label: 'Not sure', note: 'Fine. We allow for the usual places.' },
           choices: [
@@ -51,7 +51,7 @@ export const panel: Step = {
       ],
     },
     {
-      id: 'supply', title: 'How does power reach the house?',
+      id: 'supply', title: 'How does power reach the house?', short: 'power lines',
       fields: [
         choice({ id: 'serviceDrop', label: 'The power lines come', name: 'Power lines', columns: 2, unsure: { label: 'Not sure', note: 'Fine. A photo of the meter will tell us.', photo: 'meter' },
           choices: [{ value: 'overhead', label: 'Through the air' }, { value: 'underground', label: 'Out of the ground' }] }),

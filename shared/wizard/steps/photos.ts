@@ -14,6 +14,6 @@ export const photoSlotIds = photoSlots.map((slot) => slot.id) as [PhotoSlotId, .
 /** Step 6: photos. They are no fields: each is stored as it arrives. */
 export const photos: Step = {
   id: 'photos', number: 6, short: 'Photos',
-  groups: [{ id: 'photos', title: 'Five photos, then your price', hint: 'Skip any you like. The range stays wider.', cautions: ['cover', 'ladders'], why: 'The electrician reads what is hard to describe. Where the picture was taken is removed before it is kept.', fields: [] }],
+  groups: [{ id: 'photos', title: 'Five photos, then your price', short: 'photos', hint: 'Skip any you like. The range stays wider.', cautions: ['cover', 'ladders'], why: 'The electrician reads what is hard to describe. Where the picture was taken is removed before it is kept.', fields: [] }],
   summary: () => '',
 };

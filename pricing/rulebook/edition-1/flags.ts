@@ -1,0 +1,138 @@
+import type { FlagRule, Logic } from '../schema';
+
+const has = (condition: string): Logic => ({ in: [condition, { var: 'facts.panelCondition' }] });
+const is = (fact: string, value: Logic): Logic => ({ '===': [{ var: `facts.${fact}` }, value] });
+const look = 'A licensed electrician has to look at it before anyone can price it fairly.';
+const source = 'domain practice: conditions that need eyes on the panel; common practice, no source';
+
+/** What stops an automatic price. An unknown answer is no flag. */
+export const flags: FlagRule[] = [
+  {
+    id: 'scorch',
+    when: has('scorch'),
+    danger: true,
+    source,
+    words: `Scorch marks mean that something got too hot. Leave the panel alone. ${look}`,
+    deskWords: 'Scorch marks or burnt smell at the panel',
+  },
+  {
+    id: 'warm',
+    when: has('warm'),
+    danger: true,
+    source,
+    words: `A panel should not be warm to stand by. Leave it alone. ${look}`,
+    deskWords: 'Panel is warm',
+  },
+  {
+    id: 'buzzing',
+    when: has('buzzing'),
+    danger: true,
+    source,
+    words: `A panel should not buzz. Leave it alone. ${look}`,
+    deskWords: 'Panel buzzes',
+  },
+  {
+    id: 'rust_or_water',
+    when: has('rust_or_water'),
+    danger: true,
+    source,
+    words: `Rust or water does not belong in a panel. Leave it alone. ${look}`,
+    deskWords: 'Rust or water at the panel',
+  },
+  {
+    id: 'fuses',
+    when: has('fuses'),
+    danger: false,
+    source,
+    words: `A fuse box has no place for this circuit. ${look}`,
+    deskWords: 'Fuse box',
+  },
+  {
+    id: 'screwed_shut',
+    when: has('screwed_shut'),
+    danger: false,
+    source,
+    words: `Your panel’s door is screwed shut. Leave it so. ${look}`,
+    deskWords: 'Panel door screwed shut, nothing was read',
+  },
+  {
+    id: 'no_main',
+    when: is('mainBreakerAmps', 0),
+    danger: false,
+    source,
+    words: `Without a main breaker in sight we can’t tell what the service carries. ${look}`,
+    deskWords: 'No main breaker visible: split bus or main elsewhere',
+  },
+  {
+    id: 'small_main',
+    when: is('mainBreakerAmps', 60),
+    danger: false,
+    source: 'NEC 2023 230.79(C): one-family dwellings, 100 A at least',
+    words: 'A 60 A service is too small for today’s code. The whole service needs a look first.',
+    deskWords: '60 A service',
+  },
+  {
+    id: 'legacy_panel',
+    when: is('legacyPanel', true),
+    danger: false,
+    source,
+    words: 'Your panel type needs an electrician’s inspection before we can price this. A new panel may be advised.',
+    deskWords: 'Legacy panel type flagged',
+  },
+  {
+    id: 'flat',
+    when: is('homeKind', 'flat'),
+    danger: false,
+    source: 'house rule, invented for the demo',
+    words: 'In a flat or condo the wire crosses shared parts of the building. We need to see it and ask who decides.',
+    deskWords: 'Flat or condo: shared building, association’s consent',
+  },
+  {
+    id: 'mobile_home',
+    when: is('homeKind', 'mobile_home'),
+    danger: false,
+    source: 'house rule, invented for the demo',
+    words: 'A mobile home is fed in its own way. We need to see it first.',
+    deskWords: 'Mobile home: feeder and pedestal to be seen',
+  },
+  {
+    id: 'rent',
+    when: is('tenure', 'rent'),
+    danger: false,
+    source: 'house rule, invented for the demo',
+    words: 'The owner has to agree before we price work on the house. We can tell you what to ask.',
+    deskWords: 'Renter without the owner’s consent',
+  },
+  {
+    id: 'detached_garage',
+    when: is('parking', 'detached_garage'),
+    danger: false,
+    source: 'NEC 2023 225.30: one supply for each outbuilding',
+    words: 'A detached garage has a supply of its own and a trench between. We need to walk it first.',
+    deskWords: 'Detached garage: supply, sub-panel, trench',
+  },
+  {
+    id: 'paved_trench',
+    when: is('surfaceOver', 'paved'),
+    danger: false,
+    source: 'common practice, no source',
+    words: 'Going under paving is hard to judge from photos. We need to see it first.',
+    deskWords: 'Trench under paving',
+  },
+  {
+    id: 'no_way',
+    when: { '===': [{ var: 'run.ways' }, 0] },
+    danger: false,
+    source: 'run geometry',
+    words: 'We found no tidy way for the wire from here. A look on site will.',
+    deskWords: 'No feasible way from panel to charger',
+  },
+  {
+    id: 'not_served',
+    when: { '===': [{ var: 'place.served' }, false] },
+    danger: false,
+    source: 'jurisdiction table',
+    words: 'We do not work in this ZIP yet.',
+    deskWords: 'ZIP outside the served towns',
+  },
+];

@@ -1,0 +1,1 @@
+export { startForJest as default } from './cluster.mjs';

@@ -1,0 +1,1 @@
+export { stopForJest as default } from './cluster.mjs';
