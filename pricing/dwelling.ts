@@ -4,8 +4,6 @@ import type { CodeEdition } from './electrical/edition';
 import { typicalLoadVa } from './electrical/typical-loads';
 import type { KnownFacts } from './known-facts';
 
-/** Load calculations are at the service's nominal voltage, whatever a 208 V flat has. */
-export const SERVICE_VOLTS = 240;
 /** Loads that are heating or cooling; the rest are appliances, NEC 2023 220.83. */
 const hvacIds: ReadonlySet<string> = new Set(['centralAir', 'heatPump', 'stripHeat', 'roomHeaters']);
 const applianceKinds = loadKinds.filter(({ id }) => !hvacIds.has(id));
@@ -15,10 +13,10 @@ const [SMALL_APPLIANCE_CIRCUITS, LAUNDRY_CIRCUITS] = [2, 1];
 /** Room heaters when their number is not known; as typical-loads.ts counts them. */
 const USUAL_ROOM_HEATERS = 4;
 
-/** What the load calculation needs of a home, VA by typical ratings where no plate is known. */
+/** What the load calculation needs of a home, VA by typical ratings where no plate is known. At its supply's volts: NEC 2023 220.5(A), from memory. */
 export function dwellingLoads(known: KnownFacts, edition: CodeEdition): DwellingLoads {
   const { loads } = known;
-  const va = (id: keyof typeof loads) => (loads[id].present ? typicalLoadVa(id, loads[id].amount) : 0);
+  const va = (id: keyof typeof loads) => (loads[id].present ? typicalLoadVa(id, loads[id].amount, known.volts) : 0);
   const stripsHelpPump = loads.heatPump.present;
   const appliances = [];
   for (const { id, title } of applianceKinds) if (loads[id].present) appliances.push({ id, words: title, va: va(id) });
@@ -38,6 +36,6 @@ export function dwellingLoads(known: KnownFacts, edition: CodeEdition): Dwelling
     },
     // The smallest of main and bus governs.
     serviceAmps: Math.min(known.mainBreakerAmps, known.busRatingAmps),
-    volts: SERVICE_VOLTS,
+    volts: known.volts,
   };
 }

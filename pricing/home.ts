@@ -1,7 +1,8 @@
 import type { KnownFacts } from './known-facts';
-import { dwellingLoads, SERVICE_VOLTS } from './dwelling';
+import { dwellingLoads } from './dwelling';
 import { evseVa } from './electrical/evse-load';
 import { judgeLoad, type LoadVerdict } from './electrical/load-verdict';
+import { tidy } from './electrical/trace';
 import { planRuns } from './run/plan-run';
 import type { RunPlan } from './run/run-plan';
 import type { Jurisdiction } from './rulebook/schema';
@@ -19,6 +20,11 @@ export interface Home {
   readonly serviceAmps: number;
   /** The home without the new charger by the most cautious practice, heating or cooling in full. */
   readonly homeAmps: number;
+  /** The service that the rulebook upgrades to. */
+  readonly upgradeAmps: number;
+  /** Largest setting that the service carries as it is, and that the upgraded one would; 0: none, or no upgrade. */
+  readonly maxChargingAmps: number;
+  readonly maxUpgradedAmps: number;
 }
 
 const hiddenWays: ReadonlySet<string> = new Set(['open_studs', 'attic', 'crawl', 'finished_wall', 'joists']);
@@ -32,11 +38,20 @@ export function tidyWays(known: KnownFacts): readonly RunPlan[] {
   return fitting.length > 0 ? fitting : runs;
 }
 
-/** Works out a home once, for all of its options. */
-export function homeOf(known: KnownFacts, place: Jurisdiction): Home {
+/**
+ * Works out a home once, for all of its options.
+ * @param upgradeAmps the service that the rulebook upgrades to; no upgrade where there is as large a one already.
+ */
+export function homeOf(known: KnownFacts, place: Jurisdiction, upgradeAmps: number): Home {
   const loads = dwellingLoads(known, place.codeEdition);
   const verdict = judgeLoad(loads, FULL_SETTING_AMPS);
+  const { serviceAmps } = loads;
   const cautious = verdict.practices.find(({ id }) => id === 'hvac_and_ev_at_100')?.amps ?? verdict.withChargerAmps;
-  const chargerAmps = evseVa(place.codeEdition, FULL_SETTING_AMPS * SERVICE_VOLTS) / SERVICE_VOLTS;
-  return { known, place, runs: tidyWays(known), verdict, serviceAmps: loads.serviceAmps, homeAmps: cautious - chargerAmps };
+  const chargerAmps = evseVa(place.codeEdition, FULL_SETTING_AMPS * known.volts) / known.volts;
+  const { maxChargingAmps } = verdict;
+  const needsMore = maxChargingAmps < FULL_SETTING_AMPS && serviceAmps < upgradeAmps;
+  return {
+    known, place, runs: tidyWays(known), verdict, serviceAmps, homeAmps: tidy(cautious - chargerAmps), upgradeAmps, maxChargingAmps,
+    maxUpgradedAmps: needsMore ? judgeLoad({ ...loads, serviceAmps: upgradeAmps }, FULL_SETTING_AMPS).maxChargingAmps : 0,
+  };
 }

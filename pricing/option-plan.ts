@@ -24,8 +24,13 @@ const MAX_SHOWN = 4;
 export const chargersSupplied = ({ chargers, bringsOwn }: OptionPlan, known: KnownFacts): number =>
   bringsOwn || known.chargerSupply === 'theirs' ? chargers - 1 : chargers;
 
-/** kW into the car: the setting or what the car takes, whichever is less. */
-export const kwOf = (chargingAmps: number, known: KnownFacts): number => (Math.min(chargingAmps, known.carMaxAmps) * known.volts) / 1000;
+/** Most amps that the car can use, through the homeowner's charger where that is theirs. */
+export const mostUsefulAmps = (known: KnownFacts): number =>
+  known.chargerSupply === 'theirs' ? Math.min(known.carMaxAmps, known.chargerMaxAmps) : known.carMaxAmps;
+
+/** kW into the car: the setting or what car and charger take, whichever is less. */
+export const kwOf = (chargingAmps: number, known: KnownFacts): number =>
+  (Math.min(chargingAmps, mostUsefulAmps(known)) * known.volts) / 1000;
 
 /** Miles that the hours at home bring back; Wh a mile is counted at the wall, so no loss is taken off again. */
 export const milesPerNight = (chargingAmps: number, known: KnownFacts): number =>
@@ -76,7 +81,8 @@ export function candidates(facts: Facts, likely: KnownFacts, edition: Edition): 
     theirs && asked === 'wired'
       ? []
       : plugIn.map((amps) => plan(outletAsAsked ? 'everyday' : 'outlet', 'plug_in', amps, outletAsAsked, !outletAsAsked));
-  const twoCars = likely.secondCar !== 'no' && wiredPlans.length > 0 ? [plan('two_cars', 'wired', Math.max(...wired), false)] : [];
+  // Chargers share a circuit only with others of their make, which theirs is not known to be.
+  const twoCars = !theirs && likely.secondCar !== 'no' && wiredPlans.length > 0 ? [plan('two_cars', 'wired', Math.max(...wired), false)] : [];
   return [...wiredPlans, ...outlets, ...twoCars];
 }
 

@@ -1,6 +1,5 @@
 import type { PanelChange } from '../shared/quote';
 import { designFor, sharedDesignFor } from './circuit-for';
-import { SERVICE_VOLTS } from './dwelling';
 import { evseVa } from './electrical/evse-load';
 import type { CircuitDesign } from './electrical/circuit';
 import type { Home } from './home';
@@ -20,6 +19,7 @@ export interface PricedOption extends Charged {
   readonly circuit: CircuitDesign;
   readonly takeoff: Takeoff;
   readonly context: RuleContext;
+  readonly capacityFix: CapacityFix;
   readonly panelChange: PanelChange;
 }
 
@@ -37,7 +37,7 @@ function placeFor(place: Jurisdiction): RuleContext['place'] {
 function contextOf(home: Home, option: OptionPlan, run: RunPlan, circuit: RuleContext['circuit'], capacityFix: CapacityFix): RuleContext {
   const { known, verdict, serviceAmps, homeAmps, place } = home;
   const spaceFix = spaceFixOf(known.blankSpaces, capacityFix);
-  const chargerAmps = evseVa(place.codeEdition, option.chargingAmps * SERVICE_VOLTS) / SERVICE_VOLTS;
+  const chargerAmps = evseVa(place.codeEdition, option.chargingAmps * known.volts) / known.volts;
   return {
     facts: known,
     run,
@@ -89,6 +89,7 @@ export function priceOption(compiled: CompiledEdition, home: Home, option: Optio
         circuit: circuit.design,
         takeoff: taken,
         context,
+        capacityFix,
         panelChange: capacityFix !== 'none' ? capacityFix : (context.panel.spaceFix as SpaceFix),
       };
     }

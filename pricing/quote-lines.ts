@@ -1,7 +1,7 @@
 import type { QuoteLine } from '../shared/quote';
 import { explainPrice, type PricedOption } from './price-option';
 import type { Applied } from './rulebook/evaluate';
-import { fillWords } from './rulebook/words';
+import { fillWords, namesInWords } from './rulebook/words';
 import type { Home } from './home';
 import type { WorkedOption, WorkedOut } from './work-out';
 import { lowerFirst } from './words';
@@ -9,6 +9,13 @@ import { lowerFirst } from './words';
 const ROUNDING = 'Rounded so that lines add up to whole ten dollars';
 
 const part = ({ rule, words, quantity, unit, unitCents, cents }: Applied) => ({ rule, words, quantity, unit, unitCents, cents });
+
+/** A note in words; one that reads a fact nobody knows says so. */
+function noteOf({ sampler }: WorkedOut, template: string, context: object): string {
+  const note = fillWords(template, context);
+  const drawn = namesInWords(template).some((name) => name.startsWith('facts.') && sampler.streams.has(name.slice('facts.'.length)));
+  return drawn ? `Likely ${lowerFirst(note)}` : note;
+}
 
 /** A home in which this line costs something, to take its words from. */
 function contextWithLine(
@@ -37,7 +44,7 @@ export function quoteLines(
     if (!range || (range.highCents === 0 && !rule.included)) return [];
     const isThere = range.midCents > 0 || rule.included === true;
     const context = isThere ? middle.priced.context : contextWithLine(worked, entry, index, price);
-    const note = fillWords(rule.note, context);
+    const note = noteOf(worked, rule.note, context);
     const rules = parts.filter((applied) => applied.line === index).map(part);
     const rounding = range.midCents - rules.reduce((sum, { cents }) => sum + cents, 0);
     if (rounding !== 0) rules.push({ rule: 'rounding', words: ROUNDING, quantity: 1, unit: 'each', unitCents: rounding, cents: rounding });
@@ -46,7 +53,7 @@ export function quoteLines(
         id: rule.id,
         title: fillWords(rule.title, context),
         note: isThere || note === '' ? note : `Only if needed: ${lowerFirst(note)}`,
-        why: rule.why,
+        why: fillWords(rule.why, context),
         ...range,
         rules,
       },

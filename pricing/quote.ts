@@ -3,6 +3,7 @@ import { roundCents, type Cents } from '../shared/money';
 import type { LiveRange, Narrowing, PlanDrawing, QuoteDocument, QuoteOption } from '../shared/quote';
 import { TOTAL_STEP_CENTS } from './band';
 import { depositLimit } from './deposit-limit';
+import { ADVISED_DROP_PERCENT } from './electrical/voltage-drop';
 import { tidyWays } from './home';
 import { MIDDLE } from './known-sampling';
 import { loadSheet } from './load-sheet';
@@ -12,6 +13,7 @@ import { circuitWords } from './circuit-for';
 import { priceOption } from './price-option';
 import { quoteLines } from './quote-lines';
 import type { Edition } from './rulebook/schema';
+import { wholeFeet } from './run/whole-feet';
 import { planDrawing, planProblems } from './run/plan-drawing';
 import { runTrace } from './run-trace';
 import { workOut, type WorkedOption, type WorkedOut } from './work-out';
@@ -80,7 +82,15 @@ function quoteOption(facts: Facts, worked: WorkedOut, entry: WorkedOption, recom
     coversUsualDay: covers,
     recommended,
     panelChange: priced.panelChange,
-    because: optionBecause(option, known, recommended, covers, roundCents(band.midCents - recommendedMidCents, TOTAL_STEP_CENTS), kw),
+    because: optionBecause(option, known, {
+      recommended,
+      covers,
+      kw,
+      dearerCents: roundCents(band.midCents - recommendedMidCents, TOTAL_STEP_CENTS),
+      kindOpen: facts.chargerSupply === 'theirs' && facts.chargerConnection === null,
+      managed: priced.capacityFix === 'energy_management',
+      upgraded: priced.capacityFix === 'service_upgrade',
+    }),
     depositCents: Math.min(edition.deposit.cents, depositLimit(place.state, band.lowCents).limitCents ?? edition.deposit.cents),
     lowCents: band.lowCents,
     midCents: band.midCents,
@@ -102,26 +112,37 @@ function quoteOption(facts: Facts, worked: WorkedOut, entry: WorkedOption, recom
     run: {
       method: run.method,
       methodWords: run.methodWords,
-      lengthFt: run.lengthFt,
-      wallFt: run.wallFt,
-      upDownFt: run.upDownFt,
+      ...wholeFeet(run),
       bends: run.bends90,
       pullPoints: run.pullPoints,
       supports: run.supports,
     },
     takeoff: priced.takeoff.items.map(({ item, words, quantity, unit }) => ({ item, words, quantity, unit })),
     laborHours: priced.hours,
-    load: loadSheet(facts, home, option.chargingAmps),
-    trace: [...circuit.trace, ...runTrace(run)].map(({ what, value, clause }) => ({ what, value, clause })),
+    load: loadSheet(home, option.chargingAmps, priced.capacityFix, isLoadKnown(worked)),
+    trace: [...circuit.trace, ...runTrace(run, place.codeEdition)].map(({ what, value, clause }) => ({ what, value, clause })),
   };
 }
 
-function cautionsOf(codeEdition: string, options: readonly QuoteOption[]): string[] {
+/** True when nothing of the load calculation was drawn: the main, the floor area, the big loads and their sizes were answered. */
+const isLoadKnown = ({ sampler }: WorkedOut): boolean =>
+  ![...sampler.streams.keys()].some((name) => name === 'mainBreakerAmps' || name === 'floorAreaFt2' || name.startsWith('loads.'));
+
+function cautionsOf({ place, leavesOut }: WorkedOut, options: readonly QuoteOption[]): string[] {
+  const { codeEdition } = place;
+  const recommended = options.find((option) => option.recommended);
   return [
     `Designed to the ${codeEdition} NEC. The local code, the permit office and the licensed electrician decide.`,
-    ...(options.some(({ load }) => load.status === 'amber')
+    ...(options.some(({ load, panelChange }) => load.status === 'amber' && panelChange !== 'energy_management')
       ? ['The service carries this by one accepted calculation and not by the strictest. The electrician checks it.']
       : []),
+    ...(options.some(({ panelChange }) => panelChange === 'energy_management')
+      ? ['A load manager may hold the charger at nothing while the home is at its peak. The electrician confirms that it is enough.']
+      : []),
+    ...(recommended && recommended.circuit.voltageDropPercent > ADVISED_DROP_PERCENT
+      ? [`The run is long: about ${recommended.circuit.voltageDropPercent.toFixed(1)}% of the voltage is lost on it. Thicker wire would help; ask us.`]
+      : []),
+    ...(leavesOut ? ['The range leaves out homes that we would have to see first: a look at the panel tells.'] : []),
     ...(options.some(({ load }) => !load.known) ? ['The load calculation takes a typical home where an answer is missing.'] : []),
   ];
 }
@@ -150,7 +171,7 @@ export function priceIntake({ facts, edition, pricedOn, factsInWords = [], sampl
     narrowing: narrowing(worked),
     facts: [...factsInWords],
     plan: planOf(facts, worked),
-    cautions: cautionsOf(place.codeEdition, options),
+    cautions: cautionsOf(worked, options),
   };
 }
 
@@ -179,7 +200,7 @@ export function liveRange({ facts, edition, samples = LIVE_SAMPLES }: Pick<Intak
     optionTitle: shown && priced ? optionTitle(shown.option, priced.circuit.breakerAmps) : null,
     narrowing: tooEarly ? [] : narrowing(worked),
     flags: [...worked.flags],
-    load: entry && home ? loadSheet(facts, home, entry.option.chargingAmps) : null,
+    load: entry && home && priced ? loadSheet(home, entry.option.chargingAmps, priced.capacityFix, isLoadKnown(worked)) : null,
     plan: planOf(facts, worked),
     planProblems: planProblems(facts),
   };

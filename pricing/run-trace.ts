@@ -1,5 +1,6 @@
 import type { Trace } from '../shared/quote';
 import { feetInWords } from '../shared/units';
+import { clause, type CodeEdition } from './electrical/edition';
 import type { RunPlan } from './run/run-plan';
 
 const wayWords: Record<string, string> = {
@@ -16,8 +17,11 @@ const bendClause = { EMT: '358.26', PVC40: '352.26', PVC80: '352.26', NM_B: '334
 const supportClause = { EMT: '358.30', PVC40: '352.30', PVC80: '352.30', NM_B: '334.30' } as const;
 
 /** How the run's figures came to be: each stretch, the sum, bends and supports. */
-export function runTrace({ legs, lengthFt, wallFt, upDownFt, bends90, pullPoints, supports, method }: RunPlan): Trace[] {
+export function runTrace({ legs, lengthFt, wallFt, bends90, pullPoints, supports, method }: RunPlan, edition: CodeEdition): Trace[] {
   const feet = (value: number) => feetInWords(value);
+  const inches = (value: number) => Math.round(value * 12);
+  // The rest of the whole inches, so that the shown lengths add up.
+  const upDownFt = (inches(lengthFt) - inches(wallFt)) / 12;
   return [
     ...legs.map(({ way, levelFt, upDownFt: rise }) => ({
       what: wayWords[way] ?? way,
@@ -31,9 +35,13 @@ export function runTrace({ legs, lengthFt, wallFt, upDownFt, bends90, pullPoints
           {
             what: 'Bends of 90 degrees',
             value: `${bends90}, pull points ${pullPoints}`,
-            clause: `NEC 2023 ${bendClause[method]}: 360 degrees at most between pull points`,
+            clause: `${clause(edition, bendClause[method])}: 360 degrees at most between pull points`,
           },
         ]),
-    { what: 'Supports', value: String(supports), clause: `NEC 2023 ${supportClause[method]}` },
+    {
+      what: 'Supports',
+      value: supports === 0 ? 'none: fished inside the walls' : String(supports),
+      clause: clause(edition, supports === 0 ? '334.30(B)(1)' : supportClause[method]),
+    },
   ];
 }

@@ -6,6 +6,7 @@ import { homeOf, tidyWays, type Home } from './home';
 import type { KnownFacts } from './known-facts';
 import { MIDDLE, samplerFor, type Sampler } from './known-sampling';
 import { candidates, chooseOptions, coversUsualDay, type OptionPlan } from './option-plan';
+import { capacityFixes } from './panel-fix';
 import { priceOption } from './price-option';
 import { compileEdition, type CompiledEdition } from './rulebook/compile';
 import type { Edition, Jurisdiction } from './rulebook/schema';
@@ -29,10 +30,15 @@ export interface WorkedOut {
   readonly options: readonly WorkedOption[];
   /** True when every home that fits can be priced, and each option has one price in all of them. */
   readonly firm: boolean;
+  /** True when some homes that fit the answers would ask for a visit; the ranges leave them out. */
+  readonly leavesOut: boolean;
   readonly homeAt: (draw: number) => Home;
   /** The likeliest home, for what is said of car and habits. */
   readonly likely: KnownFacts;
 }
+
+/** While nothing says otherwise, the service is taken to carry a charger. */
+const CARRIED = { carried: true };
 
 const placeOf = (compiled: CompiledEdition, zip: string | null): Jurisdiction | undefined =>
   zip === null ? undefined : compiled.jurisdictionByZip.get(zip);
@@ -60,25 +66,22 @@ export function workOut(facts: Facts, edition: Edition, samples: number): Worked
   if (!homePlace) throw new RangeError('An edition has at least one jurisdiction');
   const homeAt = (draw: number): Home => {
     const known = sampler.home(draw);
-    return homeOf(known, placeOf(compiled, known.zip) ?? homePlace);
+    return homeOf(known, placeOf(compiled, known.zip) ?? homePlace, edition.options.upgradeAmps);
   };
-  const flags = raisedFlags(compiled, { facts, place: { served }, run: { ways: tidyWays(likely).length } });
-  const nothing = { compiled, sampler, place: homePlace, draws: [], options: [], firm: false, homeAt, likely };
+  const flags = raisedFlags(compiled, { facts, place: { served }, run: { ways: tidyWays(likely).length }, load: CARRIED });
+  const nothing = { compiled, sampler, place: homePlace, draws: [], options: [], firm: false, leavesOut: false, homeAt, likely };
   if (flags.length > 0) return { ...nothing, flags };
 
   const likelyHome = homeAt(MIDDLE);
-  const plans = chooseOptions(
-    candidates(facts, likely, edition),
-    likely,
-    (option) => priceOption(compiled, likelyHome, option)?.totalCents ?? null,
-  );
+  const all = candidates(facts, likely, edition);
+  const plans = chooseOptions(all, likely, (option) => priceOption(compiled, likelyHome, option)?.totalCents ?? null);
   const draws: number[] = [];
   const totals = plans.map((): number[] => []);
   const lines = plans.map((): (readonly number[])[] => []);
   const count = sampler.streams.size === 0 ? 1 : samples;
   for (let draw = 0; draw < count; draw += 1) {
     const home = homeAt(draw);
-    if (isFlagged(compiled, { facts: home.known, place: { served: true }, run: { ways: home.runs.length } })) continue;
+    if (isFlagged(compiled, { facts: home.known, place: { served: true }, run: { ways: home.runs.length }, load: CARRIED })) continue;
     const prices = plans.map((option) => priceOption(compiled, home, option));
     if (prices.some((price) => price === null)) continue;
     draws.push(draw);
@@ -88,8 +91,10 @@ export function workOut(facts: Facts, edition: Edition, samples: number): Worked
       lines[index]?.push(price.lineCents);
     });
   }
-  if (draws.length === 0 || plans.length === 0)
-    return { ...nothing, flags: raisedFlags(compiled, { facts, place: { served }, run: { ways: 0 } }) };
+  if (draws.length === 0 || plans.length === 0) {
+    const carried = all.some(({ chargingAmps }) => capacityFixes(likelyHome, chargingAmps).length > 0);
+    return { ...nothing, flags: raisedFlags(compiled, { facts, place: { served }, run: { ways: carried ? 0 : 1 }, load: { carried } }) };
+  }
 
   const banded = plans.map((option, index) => ({
     option,
@@ -104,6 +109,7 @@ export function workOut(facts: Facts, edition: Edition, samples: number): Worked
     flags,
     draws,
     firm: single && draws.length === count,
+    leavesOut: draws.length < count,
     options: banded.map((entry, index) => ({ ...entry, recommended: index === recommended })),
   };
 }

@@ -2,14 +2,13 @@
 export type Cents = number;
 
 const NBSP = '\u00a0';
+// A formatter costs more to make than to use, and a document writes many prices.
+const wholeDollars = new Intl.NumberFormat('en-US', { maximumFractionDigits: 0 });
+const withCents = new Intl.NumberFormat('en-US', { minimumFractionDigits: 2, maximumFractionDigits: 2 });
 
 /** "$1,840", or "$17.50" when there are cents. Minus is a real minus sign. */
 export function dollars(cents: Cents): string {
-  const whole = Math.abs(cents) % 100 === 0;
-  const text = (Math.abs(cents) / 100).toLocaleString('en-US', {
-    minimumFractionDigits: whole ? 0 : 2,
-    maximumFractionDigits: whole ? 0 : 2,
-  });
+  const text = (Math.abs(cents) % 100 === 0 ? wholeDollars : withCents).format(Math.abs(cents) / 100);
   return `${cents < 0 ? '−' : ''}$${text}`;
 }
 
@@ -19,7 +18,7 @@ export const dollarRange = (lowCents: Cents, highCents: Cents): string =>
 
 /** "1,640 to 2,080 dollars", for screen readers. */
 export const spokenRange = (lowCents: Cents, highCents: Cents): string => {
-  const plain = (cents: Cents) => (cents / 100).toLocaleString('en-US', { maximumFractionDigits: 0 });
+  const plain = (cents: Cents) => wholeDollars.format(cents / 100);
   return lowCents === highCents ? `${plain(lowCents)} dollars` : `${plain(lowCents)} to ${plain(highCents)} dollars`;
 };
 

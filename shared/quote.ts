@@ -73,7 +73,7 @@ export const quoteOptionSchema = range.extend({
   recommended: z.boolean(),
   /** In the middle case. */
   panelChange: z.enum(panelChanges),
-  /** Why this one, or what it brings, in one sentence. */
+  /** Why this one, or what it brings, and what it asks for, in a sentence or two. */
   because: z.string(),
   depositCents: cents,
   lines: z.array(quoteLineSchema),

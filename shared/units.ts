@@ -1,5 +1,6 @@
 /** Joins a number and its unit so that they never part at a line's end. */
 const NBSP = '\u00a0';
+const grouped = new Intl.NumberFormat('en-US');
 
 /** Puts a no-break space between every number and its unit in a text. */
 export const keepUnits = (text: string): string => text.replace(/(\d) (A|V|kW|ft|in\.|AWG|sq ft|miles|hours|steps)(?![a-z])/g, `$1${NBSP}$2`);
@@ -24,7 +25,7 @@ export const kilowattsInWords = (kw: number): string => `${kw.toFixed(1)}${NBSP}
 
 /** "1 photo", "3 photos". */
 export const countInWords = (count: number, one: string, many: string): string =>
-  `${count.toLocaleString('en-US')} ${count === 1 ? one : many}`;
+  `${grouped.format(count)} ${count === 1 ? one : many}`;
 
 /**
  * Reads a length as people type it: "9.5", "9 6", "9 ft 6 in.", "9'6".

@@ -16,7 +16,7 @@ import { Directory } from '../ui/directory';
 import { Link } from '../ui/link';
 import { Page } from '../ui/page';
 import { Plate } from '../ui/plate';
-import { RunTimeline } from '../ui/progress-run';
+import { RunTimeline } from '../ui/run-timeline';
 import { Skeleton } from '../ui/skeleton';
 import { Text } from '../ui/text';
 
@@ -50,7 +50,7 @@ function MyJob({ my }: { readonly my: My }) {
       <View style={[styles.columns, wide && styles.wide]}>
         <View style={styles.column}>
           <Card>
-            <RunTimeline items={my.timeline.map((entry) => ({ title: entry.title, note: entry.detail, state: entry.state === 'next' ? 'todo' : entry.state }))} />
+            <RunTimeline label="Where your job stands" items={my.timeline.map((entry) => ({ key: entry.id, title: entry.title, note: entry.detail, state: entry.state === 'next' ? 'todo' : entry.state }))} />
           </Card>
           {my.deposit ? (
             <Card>

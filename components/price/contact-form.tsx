@@ -3,6 +3,7 @@ import { useEffect, useRef, useState, type ReactNode } from 'react';
 import { Controller, useForm, type Control, type DefaultValues } from 'react-hook-form';
 import { View } from 'react-native';
 import { contactSchema, type Contact } from '../../shared/api/intakes';
+import { consent } from '../../shared/consent';
 import { failureWords, newIdempotencyKey, problemByField } from '../api/client';
 import { space } from '../theme/tokens';
 import { Button } from '../ui/button';
@@ -71,7 +72,7 @@ export function ContactForm({ submitLabel, busyLabel, busy, error, onSubmit, chi
         control={control}
         name="consent"
         render={({ field, fieldState }) => (
-          <Checkbox id="consent" label="You may use my details and photos for this job." note="For this job only. We sell nothing to anyone." checked={field.value === true} onChange={(checked) => field.onChange(checked || undefined)} error={fieldState.error?.message ?? null} />
+          <Checkbox id="consent" label={consent.label} note={consent.note} checked={field.value === true} onChange={(checked) => field.onChange(checked || undefined)} error={fieldState.error?.message ?? null} />
         )}
       />
       {children}

@@ -8,6 +8,8 @@ import type { SheetLine } from './trace';
 
 type Season = 'cooling' | 'heating';
 
+const TOTAL = 'Calculated load';
+const newChargerLabel = (chargingAmps: number): string => `New charger, ${chargingAmps} A`;
 const MAIN_NOT_RATED = 'the main breaker is not rated for continuous load';
 
 /** Every figure of 220.83 by one practice, in the order of the calculation, subtotals and total included. NEC 2020 and 2023. */
@@ -37,7 +39,7 @@ export function practiceSheet(
     ...hvac.full,
     ...(pooled ? [] : chargers),
     ...(extraVa > 0.5 ? [{ label: 'A quarter of the charger more', va: extraVa, clause: 'office practice', note: MAIN_NOT_RATED }] : []),
-    { label: 'Calculated load', va: load.calculatedVa, clause: load.clause },
+    { label: TOTAL, va: load.calculatedVa, clause: load.clause },
   ];
 }
 
@@ -61,7 +63,7 @@ function chargerLines({ edition, volts, appliances }: DwellingLoads, existingVa:
     ({ label, va, clause: evseClause(edition), ...(va > ratedVa ? { note: 'counts at least 7,200 VA' } : {}) });
   const there = appliances.filter(({ id }) => isCharger(id));
   const lines = there.length === 0 ? [] : [line('Charger that is there', existingVa, there.reduce((sum, { va }) => sum + va, 0))];
-  if (newVa > 0) lines.push(line(`New charger, ${chargingAmps} A`, newVa, chargingAmps * volts));
+  if (newVa > 0) lines.push(line(newChargerLabel(chargingAmps), newVa, chargingAmps * volts));
   return lines;
 }
 
@@ -84,6 +86,22 @@ function hvacLines(edition: CodeEdition, season: Season, seasons: Seasons, allIn
   };
 }
 
+/**
+ * A sheet with the charger in full, turned into one with a load manager: of the charger only what the manager permits beside the home's
+ * peak counts. NEC 2020 and 2023 625.42(A).
+ * @param sheet by the practice that counts the charger whole, outside of the tiers.
+ */
+export function managedSheet(edition: CodeEdition, sheet: readonly SheetLine[], chargingAmps: number, permittedVa: number): SheetLine[] {
+  const charger = newChargerLabel(chargingAmps);
+  const fullVa = sheet.find(({ label }) => label === charger)?.va ?? 0;
+  return sheet.map((line) => {
+    if (line.label === charger) {
+      return { label: charger, va: permittedVa, clause: clause(edition, '625.42(A)'), note: 'what the load manager permits at the home’s peak' };
+    }
+    return line.label === TOTAL ? { ...line, va: line.va - fullVa + permittedVa } : line;
+  });
+}
+
 /** Every figure of 220.87: the measured peak, its 125 %, the season by the exception, the charger. NEC 2020 and 2023. */
 export function measuredSheet(edition: CodeEdition, demand: MeasuredDemand, load: MeasuredLoad, chargingAmps: number): SheetLine[] {
   const seasonalVa = demand.recorder && demand.days < 365 ? demand.recorder.seasonalVa : 0;
@@ -92,7 +110,7 @@ export function measuredSheet(edition: CodeEdition, demand: MeasuredDemand, load
     { label: 'Highest measured demand', va: demand.peakW, clause: load.clause, note: `${demand.days} days of ${minutes}-minute readings` },
     { label: '125 % of it', va: load.existingVa - seasonalVa, clause: load.clause },
     ...(seasonalVa > 0 ? [{ label: 'Heating or cooling that did not run', va: seasonalVa, clause: load.clause }] : []),
-    { label: `New charger, ${chargingAmps} A`, va: load.calculatedVa - load.existingVa, clause: evseClause(edition) },
-    { label: 'Calculated load', va: load.calculatedVa, clause: load.clause },
+    { label: newChargerLabel(chargingAmps), va: load.calculatedVa - load.existingVa, clause: evseClause(edition) },
+    { label: TOTAL, va: load.calculatedVa, clause: load.clause },
   ];
 }

@@ -20,8 +20,10 @@ export interface EnergyManagement {
   readonly setPointAmps: number;
   /** What is left for the charger while the home draws all that it is calculated to, at most its setting. */
   readonly chargingAmpsAtPeak: number;
-  /** The home alone keeps within the set point, so that holding the charger back is enough. */
+  /** The home alone keeps within the service, so that a charger that gives way altogether never overloads it. 625.42(A). */
   readonly possible: boolean;
+  /** The home alone keeps within the set point too, which then may stand for the whole service in its load calculation. 220.70. */
+  readonly withinSetPoint: boolean;
   /** Enough is left at the peak for a car to go on charging; otherwise it waits. */
   readonly chargesAtPeak: boolean;
   readonly trace: readonly TraceEntry[];
@@ -33,14 +35,16 @@ export const chargingAmpsWithin = (limitAmps: number, homeAmps: number, charging
 
 /**
  * A listed energy management system that limits the service: its set point may be used as the load and counts as continuous, so that
- * it may be 80 % of an ordinary main. NEC 2020 625.42(A), 750.30; NEC 2023 220.70, 625.42(A), 750.30.
+ * it may be 80 % of an ordinary main. Between set point and rating the home alone is within its service and the charger, of which only
+ * what the system permits counts, waits. NEC 2020 625.42(A), 750.30; NEC 2023 220.70, 625.42(A), 750.30.
  */
 export function planEnergyManagement(input: EnergyManagementInput): EnergyManagement {
   const { edition, serviceAmps, homeAmps, chargingAmps, deviceFullRated = false } = input;
   const setPointAmps = deviceFullRated ? serviceAmps : chargingAmpsOn(serviceAmps);
   const chargingAmpsAtPeak = chargingAmpsWithin(setPointAmps, homeAmps, chargingAmps);
   return {
-    setPointAmps, chargingAmpsAtPeak, possible: homeAmps <= setPointAmps, chargesAtPeak: chargingAmpsAtPeak >= LEAST_CHARGING_AMPS,
+    setPointAmps, chargingAmpsAtPeak, possible: homeAmps <= serviceAmps, withinSetPoint: homeAmps <= setPointAmps,
+    chargesAtPeak: chargingAmpsAtPeak >= LEAST_CHARGING_AMPS,
     trace: [
       {
         what: 'Set point of the service', value: `${setPointAmps} A on a main of ${serviceAmps} A`,

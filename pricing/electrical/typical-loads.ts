@@ -1,6 +1,9 @@
 import type { LoadId } from '../../shared/loads';
 
-/** VA of one unit of a load (a ton, a kilowatt, a heater, an amp at its volts), and the amount when nobody says. */
+/** Volts of the ratings below. */
+const PLATE_VOLTS = 240;
+
+/** VA of one unit of a load (a ton, a kilowatt, a heater, an amp at 240 V), and the amount when nobody says. */
 interface Typical { readonly unitVa: number; readonly amount: number }
 
 /**
@@ -29,5 +32,9 @@ const typical: Readonly<Record<LoadId, Typical>> = {
   workshop: { unitVa: 1000, amount: 5 },
 };
 
-/** Rated VA of a load by its amount (tons, kilowatts, count, amps at 240 V); the usual amount when it is null. */
-export const typicalLoadVa = (id: LoadId, amount: number | null): number => typical[id].unitVa * (amount ?? typical[id].amount);
+/**
+ * Rated VA of a load by its amount (tons, kilowatts, count, amps); the usual amount when it is null. A charger takes its amps at the
+ * supply's volts; the plates of the others are those of 240 V, which is the cautious side at 208 V.
+ */
+export const typicalLoadVa = (id: LoadId, amount: number | null, volts = PLATE_VOLTS): number =>
+  typical[id].unitVa * (amount ?? typical[id].amount) * (id === 'otherCharger' ? volts / PLATE_VOLTS : 1);

@@ -57,6 +57,8 @@ export interface FlagContext {
   readonly place: { readonly served: boolean };
   /** How many ways the wire has; 1 while nothing says otherwise. */
   readonly run: { readonly ways: number };
+  /** False when neither the service, a load manager nor the largest upgrade carries a charger. */
+  readonly load: { readonly carried: boolean };
 }
 
 const factNames = [...Object.keys(factsSchema.shape), ...loadIds.flatMap((id) => [`loads.${id}.present`, `loads.${id}.amount`])].map(
@@ -88,4 +90,4 @@ export const ruleNames: ReadonlySet<string> = new Set([
   ...within('load', ['share', 'homeAmps', 'serviceAmps', 'status']),
   ...within('place', ['name', 'permitCents', 'inspectionVisits', 'served']),
 ]);
-export const flagNames: ReadonlySet<string> = new Set([...factNames, 'place.served', 'run.ways']);
+export const flagNames: ReadonlySet<string> = new Set([...factNames, 'place.served', 'run.ways', 'load.carried']);

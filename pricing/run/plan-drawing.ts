@@ -2,6 +2,7 @@ import type { PlanDrawing } from '../../shared/quote';
 import type { KnownFacts } from '../known-facts';
 import { cableReach } from './cable-reach';
 import type { RunPlan } from './run-plan';
+import { wholeFeet } from './whole-feet';
 
 export { planProblems } from './plan-problems';
 
@@ -16,7 +17,7 @@ export function planDrawing(known: KnownFacts, run: RunPlan | null): PlanDrawing
     garageDoor: garageDoor && { ...garageDoor }, houseDoor: houseDoor ? { ...houseDoor } : null,
     panel: known.panelPlace === 'garage_wall' && panelAt !== null ? { ...panelAt } : null,
     charger: { ...chargerAt }, car: { ...carAt }, cableLengthFt: known.cableLengthFt,
-    run: run && { points: run.points.map((point) => ({ ...point })), lengthFt: run.lengthFt, wallFt: run.wallFt, upDownFt: run.upDownFt },
+    run: run && { points: run.points.map((point) => ({ ...point })), ...wholeFeet(run) },
     cable: { reaches, usedFt, shortFt },
   };
 }

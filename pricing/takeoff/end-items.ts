@@ -21,10 +21,9 @@ export function endItems(circuit: CircuitDesign, run: RunPlan, known: KnownFacts
   if (connection === 'plug_in') {
     add(items, outlet);
     add(items, run.outdoor ? outdoorBox : outletBox);
-  } else {
-    if (circuit.disconnectRequired) add(items, disconnect);
-    add(items, known.wallFinish === 'masonry' ? masonryMounting : mounting);
-  }
+  } else if (circuit.disconnectRequired) add(items, disconnect);
+  // A charger with a plug that they bring hangs on its own bracket, which is theirs to put up.
+  if (connection === 'wired' || chargersSupplied > 0) add(items, known.wallFinish === 'masonry' ? masonryMounting : mounting);
   if (chargersSupplied > 0) add(items, charger, chargersSupplied);
   add(items, labels);
   return items;

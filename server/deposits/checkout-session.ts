@@ -14,7 +14,8 @@ export interface CheckoutFacts {
 }
 
 /**
- * Makes the provider's payment page for a deposit. The deposit's id is the idempotency key: however often it is called, one session is made.
+ * Makes the provider's payment page for a deposit. The deposit's id is the idempotency key: however often it is called, one session
+ * is made.
  * Only ids leave with the metadata; the provider gets the address for its own receipt and nothing else of the homeowner.
  */
 export function createCheckoutSession(stripe: Stripe, facts: CheckoutFacts): Promise<Stripe.Checkout.Session> {

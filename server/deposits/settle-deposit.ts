@@ -21,8 +21,8 @@ async function depositOf({ models: { Deposit } }: Db, transaction: Transaction, 
 const intentOf = ({ payment_intent: intent }: Stripe.Checkout.Session): string | null => (typeof intent === 'string' ? intent : (intent?.id ?? null));
 
 /**
- * Brings a deposit into line with the provider's session: paid (with lead, history, receipt and the mail to the desk), expired, or unchanged.
- * All in the caller's transaction; the same session again changes nothing. A second payment for one intake is sent back.
+ * Brings a deposit into line with the provider's session: paid (with lead, history, receipt and the mail to the desk), expired, or
+ * unchanged. All in the caller's transaction; the same session again changes nothing. A second payment for one intake is sent back.
  */
 export async function settleDeposit(db: Db, transaction: Transaction, session: Stripe.Checkout.Session, now: Date): Promise<Settled> {
   const deposit = await depositOf(db, transaction, session);
@@ -53,7 +53,8 @@ async function pay(db: Db, transaction: Transaction, session: Stripe.Checkout.Se
   const option = document.options.find((one) => one.id === deposit.optionId);
   if (!option) throw new RangeError(`Deposit ${id}: its quote has no option ${deposit.optionId}`);
   const { contact, consentWords, createdAt: consentAt } = deposit;
-  const lead = await createLead(db, transaction, { intakeId, quoteId: deposit.quoteId, document, option, depositId: id, contact, consentWords, consentAt }, now);
+  const job = { intakeId, quoteId: deposit.quoteId, document, option, depositId: id, contact, consentWords, consentAt };
+  const lead = await createLead(db, transaction, job, now);
   await models.History.create(
     { leadId: lead.id, intakeId, at: now, who: 'Payment provider', what: 'Deposit paid', after: `${dollars(deposit.amountCents)} for ${option.title}` },
     { transaction },

@@ -14,7 +14,12 @@ import { createCheckoutSession } from './checkout-session';
 import { settleDeposit } from './settle-deposit';
 
 export type DepositDeps = Pick<Deps, 'sequelize' | 'models' | 'stripe' | 'clock' | 'env' | 'jobs' | 'logger'>;
-export interface DepositRequest { readonly intakeId: string; readonly quoteId: string; readonly optionId: string; readonly contact: Contact }
+export interface DepositRequest {
+  readonly intakeId: string;
+  readonly quoteId: string;
+  readonly optionId: string;
+  readonly contact: Contact;
+}
 
 const paidAlready = () => problem('conflict', 'The deposit for this job is already paid. Nothing more is taken.');
 const unavailable = () => problem('payment-unavailable', 'Nothing was taken and your price is kept. Try again in a minute.');
@@ -41,7 +46,9 @@ async function chosenOption({ sequelize, clock }: DepositDeps, transaction: Tran
 }
 
 /** The pending deposit to go on with, and those that it replaces. */
-const prepare = (deps: DepositDeps, request: DepositRequest): Promise<{ deposit: Deposit; option: QuoteOption; replaced: readonly Deposit[] }> =>
+interface Prepared { readonly deposit: Deposit; readonly option: QuoteOption; readonly replaced: readonly Deposit[] }
+
+const prepare = (deps: DepositDeps, request: DepositRequest): Promise<Prepared> =>
   deps.sequelize.transaction(async (transaction) => {
     const { Deposit, Intake } = deps.models;
     const { intakeId, quoteId, optionId, contact } = request;
@@ -53,7 +60,10 @@ const prepare = (deps: DepositDeps, request: DepositRequest): Promise<{ deposit:
     const same = pending.find((one) => one.quoteId === quoteId && one.optionId === optionId && one.contact.email === contact.email);
     const deposit = same
       ? await same.update({ contact }, { transaction })
-      : await Deposit.create({ intakeId, quoteId, optionId, contact, consentWords, amountCents: option.depositCents, createdAt: deps.clock() }, { transaction });
+      : await Deposit.create(
+        { intakeId, quoteId, optionId, contact, consentWords, amountCents: option.depositCents, createdAt: deps.clock() },
+        { transaction },
+      );
     return { deposit, option, replaced: pending.filter(({ id }) => id !== deposit.id) };
   });
 
@@ -87,7 +97,9 @@ export async function startDeposit(deps: DepositDeps, request: DepositRequest): 
   const session = await atProvider(async () => {
     for (const other of replaced) await close(deps, stripe, other);
     if (deposit.checkoutSessionId !== null) return findSession(stripe, deposit.checkoutSessionId);
-    return createCheckoutSession(stripe, { depositId, intakeId, amountCents, email, optionTitle: option.title, companyName: company.name, publicUrl: deps.env.PUBLIC_URL });
+    return createCheckoutSession(stripe, {
+      depositId, intakeId, amountCents, email, optionTitle: option.title, companyName: company.name, publicUrl: deps.env.PUBLIC_URL,
+    });
   });
   if (session?.url && session.status === 'open') {
     if (deposit.checkoutSessionId === null) await deposit.update({ checkoutSessionId: session.id });

@@ -19,9 +19,13 @@ const routeOf = (request: IncomingMessage): string => {
 export const logRequests = (logger: Logger): RequestHandler => pinoHttp({
   logger, genReqId: () => randomUUID(), quietReqLogger: true,
   serializers: { req: () => undefined, res: () => undefined, err: () => undefined },
-  customAttributeKeys: { responseTime: 'ms' },
-  customProps: (request: IncomingMessage, response: ServerResponse) => ({ method: request.method, route: routeOf(request), status: response.statusCode }),
-  customLogLevel: (_request: IncomingMessage, response: ServerResponse) => (response.statusCode >= 500 ? 'warn' : 'info'),
+  customLogLevel: (_request, response) => (response.statusCode >= 500 ? 'warn' : 'info'),
   customSuccessMessage: () => 'request', customErrorMessage: () => 'request',
+  customSuccessObject: lineOf, customErrorObject: lineOf,
   autoLogging: { ignore: (request) => request.url === '/api/health' },
 });
+
+const lineOf = (request: IncomingMessage, response: ServerResponse, value?: unknown): Record<string, unknown> => {
+  const { responseTime } = (value ?? {}) as { responseTime?: number };
+  return { method: request.method, route: routeOf(request), status: response.statusCode, ms: responseTime };
+};

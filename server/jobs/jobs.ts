@@ -65,7 +65,9 @@ export function createJobs(databaseUrl: string, db: Db, logger: Logger): Jobs {
     async start(handlers) {
       await boss.start();
       for (const kind of taskKinds) {
-        await boss.createQueue(kind, { name: kind, retryLimit: RETRIES, retryDelay: RETRY_EVERY_S, retryBackoff: false, expireInSeconds: EXPIRES_AFTER_S });
+        await boss.createQueue(kind, {
+          name: kind, retryLimit: RETRIES, retryDelay: RETRY_EVERY_S, retryBackoff: false, expireInSeconds: EXPIRES_AFTER_S,
+        });
       }
       await work('send-mail', handlers['send-mail']);
       await work('refund-deposit', handlers['refund-deposit']);

@@ -12,7 +12,9 @@ export const taskKinds = ['send-mail', 'refund-deposit'] as const satisfies read
 export interface OutboxRow { readonly id: string; readonly dedupeKey: string; readonly kind: TaskKind; readonly payload: Tasks[TaskKind] }
 
 /** Writes a task down in the transaction of the change that asks for it; the same key again changes nothing. */
-export async function addTask<K extends TaskKind>({ sequelize }: Db, transaction: Transaction, kind: K, dedupeKey: string, payload: Tasks[K]): Promise<void> {
+export async function addTask<K extends TaskKind>(
+  { sequelize }: Db, transaction: Transaction, kind: K, dedupeKey: string, payload: Tasks[K],
+): Promise<void> {
   await sequelize.query(
     'INSERT INTO outbox (dedupe_key, kind, payload) VALUES ($dedupeKey, $kind, $payload) ON CONFLICT (dedupe_key) DO NOTHING',
     { transaction, bind: { dedupeKey, kind, payload: JSON.stringify(payload) } },

@@ -62,8 +62,9 @@ async function receipt(deps: ComposeDeps, mail: Mail): Promise<Composed> {
   return {
     to: deposit.contact.email,
     content: receiptMail({
-      name: lead.name, street: lead.street, town: lead.town, jobNumber: lead.jobNumber, amountCents: deposit.amountCents, paidOn: day(facts.deposit.paidAt),
-      cancelUntil: dayInWords(cancellationDeadline(isoDateIn(facts.deposit.paidAt, zone)), today), firstLookBy: due, option, cautions: document.cautions,
+      name: lead.name, street: lead.street, town: lead.town, jobNumber: lead.jobNumber, amountCents: deposit.amountCents,
+      paidOn: day(facts.deposit.paidAt), firstLookBy: due, option, cautions: document.cautions,
+      cancelUntil: dayInWords(cancellationDeadline(isoDateIn(facts.deposit.paidAt, zone)), today),
       myUrl: await myUrl(deps, lead.intakeId), sender: senderOf(deps),
     }),
   };
@@ -91,7 +92,8 @@ async function newLead(deps: ComposeDeps, mail: Mail): Promise<Composed> {
   return {
     to: company.email,
     content: newLeadMail({
-      jobNumber: lead.jobNumber, name: lead.name, town: lead.town, work: lead.work, workNote: lead.workNote, lowCents: lead.lowCents, highCents: lead.highCents,
+      jobNumber: lead.jobNumber, name: lead.name, town: lead.town, work: lead.work, workNote: lead.workNote,
+      lowCents: lead.lowCents, highCents: lead.highCents,
       depositCents: deposit?.paidAt ? deposit.amountCents : null, photoCount, flags: document.flags.map(({ deskWords }) => deskWords),
       dueOn: due, leadUrl: `${deps.env.PUBLIC_URL}/desk/leads/${lead.id}`,
     }),

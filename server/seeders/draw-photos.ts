@@ -7,9 +7,12 @@ export type DrawnPhoto = 'panel' | 'label' | 'wall' | 'way' | 'meter';
 const WIDTH = 1600;
 const HEIGHT = 1200;
 
+const page = (body: string) => `<svg xmlns="http://www.w3.org/2000/svg" width="${WIDTH}" height="${HEIGHT}" viewBox="0 0 ${WIDTH} ${HEIGHT}">${body}</svg>`;
+
 /** A little grain, so that the picture has the fine detail that a sharp photo has. */
-const grain = '<filter id="g"><feTurbulence type="fractalNoise" baseFrequency="0.9" numOctaves="2" seed="7"/><feColorMatrix values="0 0 0 0 0  0 0 0 0 0  0 0 0 0 0  0 0 0 0.35 0"/></filter><rect width="1600" height="1200" filter="url(#g)" opacity="0.5"/>';
-const page = (body: string) => `<svg xmlns="http://www.w3.org/2000/svg" width="${WIDTH}" height="${HEIGHT}" viewBox="0 0 ${WIDTH} ${HEIGHT}">${body}${grain}</svg>`;
+const grain: OverlayOptions = {
+  input: { create: { width: WIDTH, height: HEIGHT, channels: 3, background: '#808080', noise: { type: 'gaussian', mean: 128, sigma: 22 } } }, blend: 'soft-light',
+};
 
 const breaker = (x: number, y: number, blank: boolean) =>
   blank
@@ -58,17 +61,27 @@ const writing: Partial<Record<DrawnPhoto, (mainAmps: number) => Promise<OverlayO
   meter: () => [words('04817', 800, 580, 46, '#cfe6d8')],
 };
 
+async function draw(kind: DrawnPhoto, mainAmps: number, blankSpaces: number, fault: PhotoFault | undefined): Promise<Buffer> {
+  const svg = { panel: () => panel(blankSpaces), label, wall, way, meter }[kind]();
+  const drawn = await sharp(Buffer.from(svg)).composite([...(await Promise.all(writing[kind]?.(mainAmps) ?? [])), grain]).removeAlpha().raw().toBuffer({ resolveWithObject: true });
+  let image = sharp(drawn.data, { raw: drawn.info });
+  if (fault === 'dark') image = image.linear(0.16, 0);
+  if (fault === 'blurred') image = image.blur(14);
+  return image.jpeg({ quality: 82 }).toBuffer();
+}
+
+export type PhotoFault = 'dark' | 'blurred';
+const drawn = new Map<string, Promise<Buffer>>();
+
 /**
- * Draws one stand-in photo.
+ * Draws one stand-in photo; the same one is drawn once.
  * @param mainAmps the number on the main breaker's handle
  * @param fault 'dark' or 'blurred' make the pictures that a person would be asked to take again
  * @returns a JPEG of 1600 x 1200 pixels
  */
-export async function drawPhoto(kind: DrawnPhoto, mainAmps: number, blankSpaces: number, fault?: 'dark' | 'blurred'): Promise<Buffer> {
-  const svg = { panel: () => panel(blankSpaces), label, wall, way, meter }[kind]();
-  const drawn = await sharp(Buffer.from(svg)).composite(await Promise.all(writing[kind]?.(mainAmps) ?? [])).removeAlpha().png().toBuffer();
-  let image = sharp(drawn);
-  if (fault === 'dark') image = image.linear(0.16, 0);
-  if (fault === 'blurred') image = image.blur(14);
-  return image.jpeg({ quality: 82 }).toBuffer();
+export function drawPhoto(kind: DrawnPhoto, mainAmps: number, blankSpaces: number, fault?: PhotoFault): Promise<Buffer> {
+  const key = [kind, kind === 'panel' || kind === 'label' ? mainAmps : '', kind === 'panel' ? blankSpaces : '', fault].join();
+  const known = drawn.get(key) ?? draw(kind, mainAmps, blankSpaces, fault);
+  drawn.set(key, known);
+  return known;
 }

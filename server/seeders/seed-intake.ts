@@ -43,7 +43,7 @@ function homeFor({ deps, random }: Seeding, plan: DemoIntake): Answers {
   const visit = plan.reached === 'needs-a-visit';
   for (;;) {
     const answers = demoHome(random.pick(plan.homes), random, random.pick([0, 0.05, 0.15, 0.3]));
-    const { outcome } = deps.pricing.liveRange({ facts: answersToFacts(answers), edition: deps.pricing.edition, pricedOn: '2026-01-01' });
+    const { outcome } = deps.pricing.liveRange({ facts: answersToFacts(answers), edition: deps.pricing.edition });
     if ((outcome === 'visit') === visit) return answers;
   }
 }

@@ -1,6 +1,6 @@
 import { factsSchema } from '../../shared/facts';
 import { answersPatchSchema } from '../../shared/api/intakes';
-import { answersToFacts, askedFields, fieldsById, firstOpenStep, stepById, stepDone, stepProblems, steps, UNSURE, visibleGroups, type Answers, type Step } from '../../shared/wizard/index';
+import { answersToFacts, fieldsById, firstOpenStep, stepById, stepDone, stepProblems, steps, UNSURE, visibleGroups, type Answers, type Step } from '../../shared/wizard/index';
 import { factsInWords } from '../../shared/wizard/facts-in-words';
 
 const step = (id: string): Step => {

@@ -120,6 +120,15 @@ export const flags: FlagRule[] = [
     deskWords: 'Trench under paving',
   },
   {
+    id: 'beyond_service',
+    when: { '===': [{ var: 'load.carried' }, false] },
+    danger: false,
+    source: 'NEC 2023 220.83: the calculated load is above the service and above the largest upgrade priced from here',
+    words:
+      'Your answers leave no room on the service. No upgrade that we can price from here makes enough. An electrician has to plan it with you.',
+    deskWords: 'Home alone above the service and above the upgrade in the rulebook',
+  },
+  {
     id: 'no_way',
     when: { '===': [{ var: 'run.ways' }, 0] },
     danger: false,

@@ -22,9 +22,9 @@ export const lines: LineRule[] = [
   },
   {
     id: 'run',
-    title: 'Wire and conduit, {run.lengthFt|feet}',
+    title: '{run.method|wiring}, {run.lengthFt|feet}',
     note: '{circuit.words}',
-    why: 'The way from the panel to the charger, measured with its ups and downs and spare at both ends.',
+    why: 'The way from the panel to the charger with its ups and downs. Spare wire at both ends is in it.',
   },
   {
     id: 'walls',
@@ -33,7 +33,7 @@ export const lines: LineRule[] = [
     why: 'Each wall the wire goes through, or is hidden in, is opened and closed neatly.',
   },
   { id: 'paint', title: 'Paint to match', note: 'The pipe, in your wall’s color', why: 'You asked for the pipe to match the wall.' },
-  { id: 'charger', title: 'Wall charger', note: 'Up to 48 A, 18 ft cable', why: 'We supply it, and it is under our warranty.' },
+  { id: 'charger', title: '{option.chargersSupplied|chargers}', note: 'Up to 48 A, 18 ft cable', why: 'We bring it, and it is under our warranty.' },
   {
     id: 'outlet',
     title: 'Outlet and box',
@@ -43,8 +43,8 @@ export const lines: LineRule[] = [
   {
     id: 'mount',
     title: 'Mount, connect, test',
-    note: 'Set to {option.chargingAmps|amps}',
-    why: 'Hung at the right height, set to its circuit, and tested under load.',
+    note: '{option.chargingAmps|amps} charging',
+    why: 'What hangs at the end of the wire is fitted to its circuit, tested under load, and shown to you.',
   },
   {
     id: 'permit',
@@ -55,10 +55,10 @@ export const lines: LineRule[] = [
   {
     id: 'load_report',
     title: 'Written load report',
-    note: 'Close to the limit of a {load.serviceAmps|amps} main',
+    note: 'Close to the limit of a {load.serviceAmps|amps} service',
     why: 'Close to the limit of the service, the permit office wants the calculation in writing.',
   },
-  { id: 'tax', title: 'Sales tax', note: 'On materials and the charger', why: 'We pass it on to the state.' },
+  { id: 'tax', title: 'Sales tax', note: 'On {option.chargersSupplied|taxed}', why: 'We pass it on to the state.' },
   {
     id: 'labels',
     title: 'Labels and directory card',

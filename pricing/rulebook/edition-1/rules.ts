@@ -124,8 +124,9 @@ export const rules: Rule[] = [
     {
       and: [
         equals('facts.panelMount', 'flush'),
-        { '!==': [read('facts.wallFinish'), 'bare_studs'] },
         { '!==': [read('facts.panelPlace'), 'outside'] },
+        // The garage's studs say nothing of a panel elsewhere in the house.
+        { or: [{ '!==': [read('facts.panelPlace'), 'garage_wall'] }, { '!==': [read('facts.wallFinish'), 'bare_studs'] }] },
       ],
     },
   ),

@@ -23,7 +23,8 @@ export interface Mailbox {
   readonly list: () => readonly CaughtMail[];
 }
 
-const addressesOf = (to: AddressObject | AddressObject[] | undefined) => [to ?? []].flat().flatMap(({ value }) => value.flatMap(({ address }) => address ?? []));
+const addressesOf = (to: AddressObject | AddressObject[] | undefined): string[] =>
+  [to ?? []].flat().flatMap(({ value }) => value.flatMap(({ address }) => address ?? []));
 
 async function read(id: string, receivedAt: string, raw: Buffer, envelopeTo: readonly string[]): Promise<CaughtMail> {
   const mail = await simpleParser(raw, { skipImageLinks: true });

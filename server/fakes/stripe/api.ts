@@ -15,7 +15,11 @@ const refundSchema = z.strictObject({
   reason: z.enum(['duplicate', 'fraudulent', 'requested_by_customer']).optional(),
   metadata: z.record(z.string(), z.string()).optional(),
 });
-const listSchema = z.object({ limit: z.coerce.number().int().min(1).max(100).default(10), type: z.string().optional(), starting_after: z.string().optional() });
+const listSchema = z.object({
+  limit: z.coerce.number().int().min(1).max(100).default(10),
+  type: z.string().optional(),
+  starting_after: z.string().optional(),
+});
 
 /** The calls of the provider's API that we use, with its shapes and status codes. `isDown` makes it fail as a provider that is away. */
 export function apiRoutes(provider: Provider, isDown: () => boolean): Router {

@@ -15,7 +15,7 @@ export interface FakeStripeOptions {
 }
 export interface FakeStripe { readonly app: Express; readonly stop: () => void }
 
-/** The payment provider's stand-in: the calls of its API that we use under /v1, its payment page under /pay, controls for tests under /test. */
+/** The payment provider's stand-in: the calls that we use under /v1, its payment page under /pay, controls for tests under /test. */
 export function createFakeStripe({ dataDir, webhookTarget, clock = () => new Date() }: FakeStripeOptions): FakeStripe {
   const store = openStore(dataDir);
   const webhooks = startWebhooks(store, webhookTarget, clock, Stripe.API_VERSION);

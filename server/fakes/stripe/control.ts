@@ -3,7 +3,11 @@ import { z } from '../../../shared/zod';
 import type { Provider } from './settle';
 
 const modeSchema = z.object({ down: z.boolean().optional(), hold: z.boolean().optional() });
-const sendSchema = z.object({ times: z.number().int().min(1).max(50).default(1), ageSeconds: z.number().int().min(0).default(0), secret: z.string().optional() });
+const sendSchema = z.object({
+  times: z.number().int().min(1).max(50).default(1),
+  ageSeconds: z.number().int().min(0).default(0),
+  secret: z.string().optional(),
+});
 
 /**
  * What tests need and the provider has not: PUT /test/mode {down, hold} switches the API off or holds events back;

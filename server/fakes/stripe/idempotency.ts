@@ -7,7 +7,8 @@ const hashOf = (value: unknown) => createHash('sha256').update(JSON.stringify(va
 
 /**
  * Replays the first answer for a key that was seen, refuses the same key with other parameters, and refuses it while the first
- * call is still at work. A refusal of bad parameters is not kept. Source: the provider's documentation of idempotent requests (from memory).
+ * call is still at work. A refusal of bad parameters is not kept. Source: the provider's documentation of idempotent requests
+ * (from memory).
  */
 export function idempotency({ state, save }: Store): RequestHandler {
   const atWork = new Set<string>();

@@ -16,17 +16,22 @@ export function makeSession(params: SessionParams, baseUrl: string, now: Date): 
     client_reference_id: params.client_reference_id ?? null, metadata: params.metadata ?? {},
     customer: null, customer_account: null, customer_creation: 'if_required', customer_email: params.customer_email ?? null,
     customer_details: params.customer_email
-      ? { email: params.customer_email, address: null, business_name: null, individual_name: null, name: null, phone: null, tax_exempt: null, tax_ids: null }
+      ? {
+        email: params.customer_email, address: null, business_name: null, individual_name: null, name: null, phone: null, tax_exempt: null,
+        tax_ids: null,
+      }
       : null,
     total_details: { amount_discount: 0, amount_shipping: 0, amount_tax: 0 },
     payment_intent: null, payment_method_types: ['card'], payment_method_collection: 'if_required',
-    payment_method_configuration_details: null, payment_method_options: {}, allowed_payment_method_types: params.allowed_payment_method_types ?? null,
+    payment_method_configuration_details: null, payment_method_options: {},
+    allowed_payment_method_types: params.allowed_payment_method_types ?? null,
     automatic_tax: { enabled: false, liability: null, provider: null, status: null },
     custom_fields: [], custom_text: { after_submit: null, shipping_address: null, submit: null, terms_of_service_acceptance: null },
     locale: params.locale ?? null, submit_type: params.submit_type ?? null,
-    adaptive_pricing: { enabled: false }, after_expiration: null, allow_promotion_codes: null, billing_address_collection: null, client_secret: null,
-    collected_information: null, consent: null, consent_collection: null, currency_conversion: null, discounts: [], integration_identifier: null,
-    invoice: null, invoice_creation: null, managed_payments: null, origin_context: null, payment_link: null, permissions: null, recovered_from: null,
+    adaptive_pricing: { enabled: false }, after_expiration: null, allow_promotion_codes: null, billing_address_collection: null,
+    client_secret: null, collected_information: null, consent: null, consent_collection: null, currency_conversion: null, discounts: [],
+    integration_identifier: null, invoice: null, invoice_creation: null, managed_payments: null, origin_context: null, payment_link: null,
+    permissions: null, recovered_from: null,
     saved_payment_method_options: null, setup_intent: null, shipping_address_collection: null, shipping_cost: null, shipping_options: [],
     subscription: null, wallet_options: null,
   };

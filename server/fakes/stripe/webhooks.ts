@@ -4,7 +4,7 @@ import { newId, seconds, type Delivery, type Store } from './state';
 
 export interface WebhookTarget { readonly url: string; readonly secret: string }
 
-/** The `Stripe-Signature` header for a payload: HMAC-SHA256 of "timestamp.payload". Source: the provider's documentation of webhook signatures. */
+/** The `Stripe-Signature` header for a payload: HMAC-SHA256 of "timestamp.payload", as the provider's documentation has it. */
 export const signatureFor = (payload: string, secret: string, atSeconds: number): string =>
   `t=${atSeconds},v1=${createHmac('sha256', secret).update(`${atSeconds}.${payload}`).digest('hex')}`;
 
@@ -26,7 +26,6 @@ export interface Webhooks {
 export function startWebhooks({ state, save }: Store, target: () => WebhookTarget | null, clock: () => Date, apiVersion: string): Webhooks {
   let held = false;
   let stopped = false;
-  let timer: NodeJS.Timeout | undefined;
 
   const send = async (event: Stripe.Event, at = clock(), secret = target()?.secret): Promise<number> => {
     const to = target();
@@ -61,7 +60,7 @@ export function startWebhooks({ state, save }: Store, target: () => WebhookTarge
   };
   // A delivery that was on its way when the process ended (JSON keeps Infinity as null) is taken up again.
   for (const delivery of state.deliveries) delivery.nextAt ??= 0;
-  timer = setInterval(tick, 200);
+  const timer = setInterval(tick, 200);
 
   return {
     send,

@@ -48,7 +48,8 @@ export function receiptMail(facts: ReceiptFacts): MailContent {
       ]),
       button('Open my job', facts.myUrl),
       heading('How to cancel'),
-      // 16 CFR 429.1 (three business days) is given to everyone, though sales made wholly online are outside it: common practice; have the wording confirmed.
+      // 16 CFR 429.1 (three business days) is given to everyone, though sales made wholly online are outside it: common practice;
+      // have the wording confirmed.
       text(`All of the deposit comes back until you pick a day. You also have the right to cancel, for any reason, until midnight of ${facts.cancelUntil}, the third business day after you paid.`),
       text(`To cancel, reply to this mail or call ${sender.phone}. Your deposit goes back to the card you paid with.`),
       caution(`Never remove the metal cover of the panel. If it is warm, buzzing or smells burnt, leave it alone and call ${sender.phone}.`),

@@ -37,12 +37,16 @@ describe('energy management: NEC 2023 220.70 and 750.30, set point as a continuo
     expect(plan.trace[0]?.clause).toBe('NEC 2023 220.70, 750.30');
     expect(planEnergyManagement({ ...home, edition: '2020' }).trace[0]?.clause).toBe('NEC 2020 625.42(A), 750.30');
   });
-  it('below 6 A, the least of the pilot signal, the car waits; above the set point holding it back is not enough', () => {
+  it('below 6 A, the least of the pilot signal, the car waits; above the set point it may not stand for the load (220.70)', () => {
     expect(planEnergyManagement({ ...home, homeAmps: 74 })).toMatchObject({ chargingAmpsAtPeak: 6, chargesAtPeak: true });
     expect(planEnergyManagement({ ...home, homeAmps: 74.1 })).toMatchObject({ chargingAmpsAtPeak: 5, chargesAtPeak: false,
       possible: true });
-    expect(planEnergyManagement({ ...home, homeAmps: 80 })).toMatchObject({ chargingAmpsAtPeak: 0, possible: true });
-    expect(planEnergyManagement({ ...home, homeAmps: 80.1 })).toMatchObject({ possible: false });
+    expect(planEnergyManagement({ ...home, homeAmps: 80 })).toMatchObject({ chargingAmpsAtPeak: 0, withinSetPoint: true });
+    expect(planEnergyManagement({ ...home, homeAmps: 80.1 })).toMatchObject({ withinSetPoint: false });
+  });
+  it('of the charger only what the system permits counts (625.42(A)), so a home within its service may have one, above it not', () => {
+    expect(planEnergyManagement({ ...home, homeAmps: 100 })).toMatchObject({ chargingAmpsAtPeak: 0, possible: true });
+    expect(planEnergyManagement({ ...home, homeAmps: 100.1 })).toMatchObject({ chargingAmpsAtPeak: 0, possible: false });
   });
   it('a device listed for 100 % may be set to its whole rating', () => {
     expect(planEnergyManagement({ ...home, deviceFullRated: true })).toMatchObject({ setPointAmps: 100, chargingAmpsAtPeak: 28 });

@@ -1,0 +1,1 @@
+export { DeskLayout as default } from '../../components/desk/desk-layout';

@@ -1,0 +1,1 @@
+export { DeskHome as default } from '../../components/desk/desk-home';

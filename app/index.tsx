@@ -1,0 +1,1 @@
+export { LandingScreen as default } from '../components/landing/landing-screen';

@@ -1,0 +1,1 @@
+export { ResumeScreen as default } from '../../components/resume/resume-screen';

@@ -1,0 +1,1 @@
+export { ResumeHelpScreen as default } from '../../components/resume/resume-help-screen';

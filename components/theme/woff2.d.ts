@@ -1,0 +1,5 @@
+/** The address of a font file. */
+declare module '*.woff2' {
+  const address: string;
+  export default address;
+}

@@ -1,0 +1,2 @@
+/** Nothing to skip where there is no keyboard. */
+export const SkipLink = (): null => null;

@@ -1,0 +1,50 @@
+import Ruler from 'lucide-react-native/icons/ruler';
+import { View } from 'react-native';
+import { dollarRange } from '../../shared/money';
+import { feetInWords } from '../../shared/units';
+import { Tape } from '../price/tape';
+import { border, colors, radius, space } from '../theme/tokens';
+import { Dock } from '../ui/dock';
+import { Glyph } from '../ui/glyph';
+import { StatusTag } from '../ui/status-tag';
+import { Text } from '../ui/text';
+import { rangeLine, standOf } from './range-change';
+import { BackLink, NextButton } from './step-nav';
+import type { StepState } from './use-step';
+import { useWizard } from './wizard-context';
+
+/** The step from which the range is shown: before it, too little is known for one. */
+const SHOWN_FROM_STEP = 3;
+
+/** Back and Next, and from the third step on the range on its tape with one line about it. */
+export function RangeDock({ state }: { state: StepState }) {
+  const { intake, rangeBefore } = useWizard();
+  const range = intake?.range;
+  const buttons = { back: <BackLink state={state} />, next: <NextButton state={state} /> };
+  if (!range || state.step.number < SHOWN_FROM_STEP || range.outcome === 'too-early') return <Dock {...buttons} />;
+  const stand = standOf(range);
+  const visit = range.outcome === 'visit';
+  const run = state.group?.drawing === 'plan' ? range.plan?.run : null;
+  const line = visit ? (range.flags[0]?.words ?? 'We can’t give a fair range for this one from here. A free visit can.') : rangeLine(range, rangeBefore, state.step.id === 'photos');
+  return (
+    <Dock
+      {...buttons}
+      range={stand ? dollarRange(stand.lowCents, stand.highCents) : null}
+      side={visit ? <StatusTag kind="visit" label="Needs a visit" /> : run ? <RunTag lengthFt={run.lengthFt} /> : range.outcome === 'firm' ? 'firm price' : 'likely total'}
+      tape={visit ? null : <Tape lowCents={range.lowCents} highCents={range.highCents} previous={rangeBefore} outcome={range.outcome} />}
+      line={line && state.group?.drawing !== 'plan' ? (
+        <View style={{ flexDirection: 'row', gap: space[2], alignItems: 'flex-start' }}>
+          <Glyph of={Ruler} color={visit ? 'ink2' : 'copper'} />
+          <Text variant="note" weight={700} color={visit ? 'ink2' : 'copper'} style={{ flex: 1 }}>{line}</Text>
+        </View>
+      ) : null}
+    />
+  );
+}
+
+/** How long the drawn run is, beside the range that follows from it. */
+const RunTag = ({ lengthFt }: { lengthFt: number }) => (
+  <View style={{ borderWidth: border.control, borderColor: colors.copper, borderRadius: radius.tag, paddingHorizontal: space[2], paddingVertical: 2 }}>
+    <Text variant="note" weight={800} color="copper">{`${feetInWords(Math.round(lengthFt))} run`}</Text>
+  </View>
+);

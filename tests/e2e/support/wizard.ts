@@ -1,0 +1,37 @@
+import { expect, type Locator, type Page } from '@playwright/test';
+
+/** What a person does on a step of the wizard, by what they read on it. */
+export function wizardOn(page: Page) {
+  const group = (label: string): Locator => page.getByRole('radiogroup', { name: label, exact: true });
+  return {
+    /** Picks one of the cards, or of the list that folds away beside the plan. */
+    async pick(label: string, choice: string): Promise<void> {
+      const list = page.getByRole('combobox', { name: label, exact: true });
+      await expect(group(label).or(list)).toBeVisible();
+      if (await list.isVisible()) await list.selectOption({ label: choice });
+      else await group(label).getByRole('radio', { name: choice }).check({ force: true });
+    },
+    /** Ticks one of several. */
+    async tick(label: string, choice: string): Promise<void> {
+      await page.getByRole('group', { name: label, exact: true }).getByRole('checkbox', { name: choice }).check({ force: true });
+    },
+    async type(label: string, number: string): Promise<void> {
+      const box = page.getByRole('spinbutton', { name: label, exact: true });
+      await box.fill(number);
+      await box.press('Tab');
+    },
+    /** Turns a tile of the board on. */
+    async turnOn(load: string): Promise<void> {
+      const tile = page.getByRole('checkbox', { name: new RegExp(`^${load}\\.`) });
+      await tile.tap();
+      await expect(tile).toBeChecked();
+    },
+    /** The screen that is open, by its heading. */
+    async see(title: string): Promise<void> {
+      await expect(page.getByRole('heading', { level: 1, name: title, exact: true })).toBeVisible();
+    },
+    async next(label?: string): Promise<void> {
+      await page.getByRole('button', { name: label ?? /^Next: |^See my price$/ }).click();
+    },
+  };
+}
