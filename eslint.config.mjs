@@ -1,5 +1,6 @@
 import reactHooks from 'eslint-plugin-react-hooks';
 import tseslint from 'typescript-eslint';
+import unused from './metro/unused.js';
 
 export default tseslint.config(
   { ignores: ['node_modules/', 'dist/', '.data/', '.expo/', 'coverage/', 'test-results/', 'playwright-report/', 'expo-env.d.ts'] },
@@ -37,7 +38,14 @@ export default tseslint.config(
   {
     files: ['{app,components}/**/*.{ts,tsx}'],
     plugins: { 'react-hooks': reactHooks },
-    rules: reactHooks.configs.recommended.rules,
+    rules: {
+      ...reactHooks.configs.recommended.rules,
+      'no-restricted-imports': ['error', {
+        paths: unused.filter(({ names }) => names.length > 0).map(({ library, names }) => ({
+          name: library, importNames: names, message: 'It is left out of the bundle: see metro/unused.js.',
+        })),
+      }],
+    },
   },
   {
     files: ['{app,components,shared,pricing}/**/*.{ts,tsx}'],

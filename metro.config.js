@@ -1,7 +1,9 @@
 const { getDefaultConfig } = require('expo/metro-config');
 const path = require('node:path');
+const unused = require('./metro/unused');
 
 const config = getDefaultConfig(__dirname);
+const nothing = path.join(__dirname, 'metro', 'nothing.js');
 
 config.resolver.assetExts.push('woff2');
 // Servers, rules and tests have no business in a bundle, and watching them costs time.
@@ -9,14 +11,11 @@ config.resolver.blockList = [/\/(server|pricing|tests|dist|\.data)\/.*/].map(
   (pattern) => new RegExp(`^${path.join(__dirname).replace(/[.*+?^${}()|[\]\\]/g, '\\$&')}${pattern.source}`),
 );
 
-// zod brings some forty languages (277 KB) along with its errors; our words are our own.
-const zodLocales = /^\.\.\/locales\/index\.(js|cjs)$/;
-// In the browser SVG needs no library: see that file.
-const leanSvg = path.join(__dirname, 'components/drawings/svg.web.tsx');
 config.resolver.resolveRequest = (context, moduleName, platform) => {
-  if (platform === 'web' && moduleName === 'react-native-svg') return { type: 'sourceFile', filePath: leanSvg };
-  if (zodLocales.test(moduleName) && /[\\/]node_modules[\\/]zod[\\/]v4[\\/]/.test(context.originModulePath)) return { type: 'empty' };
-  return context.resolveRequest(context, moduleName, platform);
+  const found = context.resolveRequest(context, moduleName, platform);
+  if (found.type !== 'sourceFile') return found;
+  const inLibrary = found.filePath.split(`${path.sep}node_modules${path.sep}`).at(-1).split(path.sep).join('/');
+  return unused.some(({ pattern }) => pattern.test(inLibrary)) ? { type: 'sourceFile', filePath: nothing } : found;
 };
 
 module.exports = config;

@@ -66,9 +66,11 @@ export function bandOf(samples: Samples): Band {
   const [low, mid, high] = [total(LOW), total(MIDDLE), total(HIGH)];
 
   const midRaw = samples.lines[at(MIDDLE)] ?? [];
+  const midUnits = roundLines(midRaw, mid / LINE_STEP_CENTS);
+  const ends = { lowCents: low, midCents: mid, highCents: high, midSample: at(MIDDLE), highSample: at(HIGH) };
+  if (low === high) return { ...ends, lines: midUnits.map((units) => atOnce(units * LINE_STEP_CENTS)) };
   const lineCount = midRaw.length;
   const unlimited = midRaw.map(() => Number.MAX_SAFE_INTEGER);
-  const midUnits = roundLines(midRaw, mid / LINE_STEP_CENTS);
   const lowRaw = meanLines(samples, order, LOW, lineCount);
   const highRaw = meanLines(samples, order, HIGH, lineCount);
   const down = shareOut(
@@ -80,11 +82,7 @@ export function bandOf(samples: Samples): Band {
   const up = shareOut((high - mid) / LINE_STEP_CENTS, strays.some((weight) => weight > 0) ? strays : midUnits, unlimited);
 
   return {
-    lowCents: low,
-    midCents: mid,
-    highCents: high,
-    midSample: at(MIDDLE),
-    highSample: at(HIGH),
+    ...ends,
     lines: midUnits.map((units, line) => ({
       lowCents: (units - (down[line] ?? 0)) * LINE_STEP_CENTS,
       midCents: units * LINE_STEP_CENTS,
@@ -92,6 +90,9 @@ export function bandOf(samples: Samples): Band {
     })),
   };
 }
+
+/** One price, low, mid and high. */
+const atOnce = (cents: Cents): Range => ({ lowCents: cents, midCents: cents, highCents: cents });
 
 /** Lines in whole units that add up to `totalUnits`: each rounded down, the rest to the largest remainders. */
 function roundLines(cents: readonly Cents[], totalUnits: number): number[] {

@@ -41,8 +41,9 @@ export function tidyWays(known: KnownFacts): readonly RunPlan[] {
 /**
  * Works out a home once, for all of its options.
  * @param upgradeAmps the service that the rulebook upgrades to; no upgrade where there is as large a one already.
+ * @param runs the ways for the wire, when they were planned already.
  */
-export function homeOf(known: KnownFacts, place: Jurisdiction, upgradeAmps: number): Home {
+export function homeOf(known: KnownFacts, place: Jurisdiction, upgradeAmps: number, runs = tidyWays(known)): Home {
   const loads = dwellingLoads(known, place.codeEdition);
   const verdict = judgeLoad(loads, FULL_SETTING_AMPS);
   const { serviceAmps } = loads;
@@ -51,7 +52,7 @@ export function homeOf(known: KnownFacts, place: Jurisdiction, upgradeAmps: numb
   const { maxChargingAmps } = verdict;
   const needsMore = maxChargingAmps < FULL_SETTING_AMPS && serviceAmps < upgradeAmps;
   return {
-    known, place, runs: tidyWays(known), verdict, serviceAmps, homeAmps: tidy(cautious - chargerAmps), upgradeAmps, maxChargingAmps,
+    known, place, runs, verdict, serviceAmps, homeAmps: tidy(cautious - chargerAmps), upgradeAmps, maxChargingAmps,
     maxUpgradedAmps: needsMore ? judgeLoad({ ...loads, serviceAmps: upgradeAmps }, FULL_SETTING_AMPS).maxChargingAmps : 0,
   };
 }

@@ -13,7 +13,8 @@ const part = ({ rule, words, quantity, unit, unitCents, cents }: Applied) => ({ 
 /** A note in words; one that reads a fact nobody knows says so. */
 function noteOf({ sampler }: WorkedOut, template: string, context: object): string {
   const note = fillWords(template, context);
-  const drawn = namesInWords(template).some((name) => name.startsWith('facts.') && sampler.streams.has(name.slice('facts.'.length)));
+  const drawn = sampler.streams.size > 0
+    && namesInWords(template).some((name) => name.startsWith('facts.') && sampler.streams.has(name.slice('facts.'.length)));
   return drawn ? `Likely ${lowerFirst(note)}` : note;
 }
 

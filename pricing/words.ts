@@ -34,8 +34,8 @@ export interface OptionBrings {
 const OUTLET = 'A heavy-duty outlet for a charger with a 14-50 plug, which you can take along when you move.';
 const WIRED_KIND = ' Your charger must be of the kind that is wired in.';
 const PLUG_KIND = ' Your charger must have a 14-50 plug.';
-const MANAGED = ' It waits while the house is busy. The electrician confirms the load manager.';
-const UPGRADED = ' The service grows first.';
+const MANAGED = ' The charger waits while the house is busy; the electrician confirms it.';
+const UPGRADED = ' A larger service comes first.';
 
 /** Why this option, or what it brings: one sentence, and one more for each thing that it takes. */
 export function optionBecause(option: OptionPlan, known: KnownFacts, brings: OptionBrings): string {
@@ -43,21 +43,21 @@ export function optionBecause(option: OptionPlan, known: KnownFacts, brings: Opt
   return `${mainReason(option, known, brings)}${kind}${brings.managed ? MANAGED : ''}${brings.upgraded ? UPGRADED : ''}`;
 }
 
-function mainReason(option: OptionPlan, known: KnownFacts, { recommended, covers, dearerCents, kw }: OptionBrings): string {
+function mainReason(option: OptionPlan, known: KnownFacts, { recommended, covers, dearerCents, kw, managed }: OptionBrings): string {
   const usual = countInWords(known.milesPerDay, 'mile', 'miles');
-  const nightly = countInWords(milesPerNight(option.chargingAmps, known), 'mile', 'miles');
+  const nightly = `${managed ? 'up to' : 'about'} ${countInWords(milesPerNight(option.chargingAmps, known), 'mile', 'miles')}`;
   if (recommended) {
     const included = chargersSupplied(option, known) > 0 ? ', charger included,' : '';
     return covers
-      ? `The lowest price${included} that covers your usual ${usual}. A night brings back about ${nightly}.`
-      : `The fastest here. A night brings back about ${nightly} of your usual ${usual}.`;
+      ? `The lowest price${included} that covers your usual ${usual}. A night brings back ${nightly}.`
+      : `The fastest here. A night brings back ${nightly} of your usual ${usual}.`;
   }
   if (option.chargers === 2) return `Two cars share one circuit of ${kilowattsInWords(kw)}, so the panel carries no more than one charger.`;
   if (!option.asAsked) return OUTLET;
   const more = dearerCents > 0 ? `, for about ${dollars(dearerCents)} more` : '';
-  if (option.role !== 'full') return `A night brings back about ${nightly}${more}.`;
+  if (option.role !== 'full') return `A night brings back ${nightly}${more}.`;
   const fastest = option.chargingAmps >= mostUsefulAmps(known) ? 'As fast as your car and charger allow' : 'The fastest here';
-  return `${fastest}: a night brings back about ${nightly}${more}.`;
+  return `${fastest}: a night brings back ${nightly}${more}.`;
 }
 
 /** "The charger" to "the charger", so that a note can follow other words. */

@@ -64,25 +64,33 @@ export function workOut(facts: Facts, edition: Edition, samples: number): Worked
   const likely = sampler.home(MIDDLE);
   const homePlace = placeOf(compiled, likely.zip) ?? edition.jurisdictions[0];
   if (!homePlace) throw new RangeError('An edition has at least one jurisdiction');
+  const likelyWays = tidyWays(likely);
+  let likelyHome: Home | null = null;
+  const isOnlyHome = sampler.streams.size === 0;
   const homeAt = (draw: number): Home => {
-    const known = sampler.home(draw);
-    return homeOf(known, placeOf(compiled, known.zip) ?? homePlace, edition.options.upgradeAmps);
+    const isLikely = draw === MIDDLE || isOnlyHome;
+    if (isLikely && likelyHome) return likelyHome;
+    const known = isLikely ? likely : sampler.home(draw);
+    const place = placeOf(compiled, known.zip) ?? homePlace;
+    if (!isLikely) return homeOf(known, place, edition.options.upgradeAmps);
+    return (likelyHome = homeOf(known, place, edition.options.upgradeAmps, likelyWays));
   };
-  const flags = raisedFlags(compiled, { facts, place: { served }, run: { ways: tidyWays(likely).length }, load: CARRIED });
+  const flags = raisedFlags(compiled, { facts, place: { served }, run: { ways: likelyWays.length }, load: CARRIED });
   const nothing = { compiled, sampler, place: homePlace, draws: [], options: [], firm: false, leavesOut: false, homeAt, likely };
   if (flags.length > 0) return { ...nothing, flags };
 
-  const likelyHome = homeAt(MIDDLE);
+  const middle = homeAt(MIDDLE);
   const all = candidates(facts, likely, edition);
-  const plans = chooseOptions(all, likely, (option) => priceOption(compiled, likelyHome, option)?.totalCents ?? null);
+  const inMiddle = new Map(all.map((option) => [option.id, priceOption(compiled, middle, option)]));
+  const plans = chooseOptions(all, likely, ({ id }) => inMiddle.get(id)?.totalCents ?? null);
   const draws: number[] = [];
   const totals = plans.map((): number[] => []);
   const lines = plans.map((): (readonly number[])[] => []);
-  const count = sampler.streams.size === 0 ? 1 : samples;
+  const count = isOnlyHome ? 1 : samples;
   for (let draw = 0; draw < count; draw += 1) {
     const home = homeAt(draw);
     if (isFlagged(compiled, { facts: home.known, place: { served: true }, run: { ways: home.runs.length }, load: CARRIED })) continue;
-    const prices = plans.map((option) => priceOption(compiled, home, option));
+    const prices = plans.map((option) => (home === middle ? inMiddle.get(option.id) : priceOption(compiled, home, option)) ?? null);
     if (prices.some((price) => price === null)) continue;
     draws.push(draw);
     prices.forEach((price, index) => {
@@ -92,7 +100,7 @@ export function workOut(facts: Facts, edition: Edition, samples: number): Worked
     });
   }
   if (draws.length === 0 || plans.length === 0) {
-    const carried = all.some(({ chargingAmps }) => capacityFixes(likelyHome, chargingAmps).length > 0);
+    const carried = all.some(({ chargingAmps }) => capacityFixes(middle, chargingAmps).length > 0);
     return { ...nothing, flags: raisedFlags(compiled, { facts, place: { served }, run: { ways: carried ? 0 : 1 }, load: { carried } }) };
   }
 

@@ -2,9 +2,8 @@ import express, { Router, type Express } from 'express';
 import { endpoints } from '../shared/api/index';
 import { companyRoutes } from './company/routes';
 import { depositRoutes } from './deposits/routes';
-import { followupRoutes } from './followups/routes';
-import { myRoutes } from './my/routes';
 import type { Deps } from './deps';
+import { followupRoutes } from './followups/routes';
 import type { Api } from './http/bind';
 import { handleErrors } from './http/errors';
 import { logRequests } from './http/log';
@@ -12,13 +11,16 @@ import { notFound } from './http/not-found';
 import { securityHeaders } from './http/security';
 import { intakeRoutes } from './intakes/routes';
 import { leadRoutes } from './leads/routes';
+import { myRoutes } from './my/routes';
 import { buildOpenApi } from './openapi/build-openapi';
 import { photoRoutes } from './photos/routes';
 import { quoteRoutes } from './quotes/routes';
 import { sessionRoutes } from './session/routes';
 
 /** Every resource, each binding its endpoints. */
-const resources: readonly ((api: Api) => void)[] = [companyRoutes, intakeRoutes, photoRoutes, quoteRoutes, depositRoutes, followupRoutes, myRoutes, sessionRoutes, leadRoutes];
+const resources: readonly ((api: Api) => void)[] = [
+  companyRoutes, intakeRoutes, photoRoutes, quoteRoutes, depositRoutes, followupRoutes, myRoutes, sessionRoutes, leadRoutes,
+];
 
 /** The server: the order of its middleware and nothing else. `bound` lists the endpoints that have a handler. */
 export function createApp(deps: Deps): { readonly app: Express; readonly bound: Api['bound'] } {

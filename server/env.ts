@@ -39,7 +39,9 @@ const together = [
 ] as const;
 
 /** Reads the configuration. An empty variable counts as absent. Every line of `problems` names its variable. */
-export function readEnv(given: Readonly<Record<string, string | undefined>>): { readonly env: Env } | { readonly problems: readonly string[] } {
+export function readEnv(
+  given: Readonly<Record<string, string | undefined>>,
+): { readonly env: Env } | { readonly problems: readonly string[] } {
   const present = Object.fromEntries(Object.entries(given).filter(([, value]) => value !== undefined && value !== ''));
   const half = together.filter(([name, needed]) => present[name] !== undefined && present[needed] === undefined)
     .map(([name, needed]) => `${needed}: is missing, and ${name} does not work without it`);

@@ -2,12 +2,14 @@ import { createServer, type Server } from 'node:http';
 import { createApp } from './app';
 import { createDeps } from './create-deps';
 import { readEnv, type Env } from './env';
+import { sweepTries } from './http/rate-limits';
 import { rangeOf } from './intakes/range-of';
 import { createHandlers } from './jobs/handlers';
 
 /** A balancer gives up on us after this; whoever is still being served then is cut off. */
 const STOP_WITHIN_MS = 10_000;
 const JOBS_STOP_WITHIN_MS = 5_000;
+const SWEEP_EVERY_MS = 3_600_000;
 
 const listening = (server: Server, { HOST, PORT }: Env): Promise<void> =>
   new Promise((resolve, reject) => { server.once('error', reject).listen(PORT, HOST, resolve); });
@@ -35,6 +37,7 @@ async function run(env: Env): Promise<void> {
 
   rangeOf(pricing, {}); // compiles the rulebook before the first visitor waits for it
   await jobs.start(createHandlers(deps));
+  setInterval(() => { sweepTries(sequelize).catch(() => logger.warn('old counts of tries are swept later')); }, SWEEP_EVERY_MS).unref();
   await listening(server, env);
   const address = server.address();
   logger.info({ port: typeof address === 'object' ? address?.port : env.PORT, demo: env.DEMO }, 'listening');

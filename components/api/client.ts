@@ -19,6 +19,9 @@ export interface CallOptions {
 }
 export type RequestOptions<P extends Part, Q extends Part, B extends Part> = CallOptions & Needed<'params', P> & Needed<'query', Q> & Needed<'body', B>;
 
+/** The options may be left out when nothing in them is needed. */
+type OptionsArgument<O> = Partial<O> extends O ? [options?: O] : [options: O];
+
 type Call = Pick<Endpoint, 'method' | 'path'>;
 type Loose = CallOptions & { readonly params?: unknown; readonly query?: unknown; readonly body?: unknown };
 
@@ -27,7 +30,7 @@ type Loose = CallOptions & { readonly params?: unknown; readonly query?: unknown
  * @throws ProblemError when the server refuses, NetworkError when no answer comes.
  */
 export function request<P extends Part, Q extends Part, B extends Part, R extends Part>(
-  endpoint: Endpoint<P, Q, B, R>, ...[options]: RequestOptions<P, Q, B> extends CallOptions ? [options?: RequestOptions<P, Q, B>] : [options: RequestOptions<P, Q, B>]
+  endpoint: Endpoint<P, Q, B, R>, ...[options]: OptionsArgument<RequestOptions<P, Q, B>>
 ): Promise<Answered<R>> {
   return send<Answered<R>>(endpoint, options as Loose | undefined);
 }

@@ -8,7 +8,8 @@ export const depositKey = ['deposit'] as const;
 /** Makes the payment page for the deposit of one option. `key` stays the same while the same attempt is repeated. */
 export const useStartDeposit = () =>
   useMutation({
-    mutationFn: ({ key, ...body }: { quoteId: string; optionId: string; contact: Contact; key: string }) => request(startDeposit, { body, idempotencyKey: key }),
+    mutationFn: ({ key, ...body }: { quoteId: string; optionId: string; contact: Contact; key: string }) =>
+      request(startDeposit, { body, idempotencyKey: key }),
   });
 
 /** Where the deposit stands; asks again every `everyMs` while it is pending. */

@@ -18,8 +18,8 @@ export function DeskRail({ session, leave, folded }: { readonly session: Session
   const open = counts?.reduce((sum, { stage, count }) => (stage === 'closed' ? sum : sum + count), 0);
   const initials = session.name.split(/\s+/).map((word) => word.charAt(0)).slice(0, 2).join('');
   return (
-    <View dataSet={{ part: 'rail', surface: 'spruce' }} style={[styles.rail, folded && styles.folded]}>
-      <View role="banner" style={styles.brand}>
+    <View role="banner" dataSet={{ part: 'rail', surface: 'spruce' }} style={[styles.rail, folded && styles.folded]}>
+      <View style={styles.brand}>
         <BrandMark size={36} light />
         {folded ? null : (
           <View style={styles.words}>
@@ -28,15 +28,16 @@ export function DeskRail({ session, leave, folded }: { readonly session: Session
           </View>
         )}
       </View>
-      <View role="navigation" aria-label="Desk" style={styles.pages}>
-        <View aria-hidden style={styles.bus} />
+      <View role="navigation" aria-label="Desk" style={[styles.pages, folded && styles.close]}>
+        {folded ? null : <View aria-hidden style={styles.bus} />}
         {deskPages.filter((page) => page.roles.includes(session.role)).map((page, index) => (
           <RailTile
-            key={page.id} number={index + 1} title={page.title} href={page.href} count={open} current={path.startsWith(page.href)} folded={folded}
+            key={page.id} number={index + 1} title={page.title} href={page.href} count={open}
+            current={path.startsWith(page.href)} folded={folded}
           />
         ))}
-        <View aria-hidden style={styles.blank} />
-        <View aria-hidden style={styles.blank} />
+        {folded ? null : <View aria-hidden style={styles.blank} />}
+        {folded ? null : <View aria-hidden style={styles.blank} />}
       </View>
       <View style={styles.foot}>
         <View style={styles.person}>
@@ -60,6 +61,7 @@ const styles = StyleSheet.create({
   brand: { flexDirection: 'row', alignItems: 'center', gap: 10, paddingHorizontal: 18 },
   words: { flexShrink: 1, minWidth: 0 },
   pages: { gap: space[2], paddingLeft: 14, paddingRight: 48, flexGrow: 1 },
+  close: { paddingRight: 14 },
   bus: {
     position: 'absolute', right: 34, top: 8, height: 200, width: 8,
     borderRadius: 4, backgroundColor: colors.live, borderWidth: 1, borderColor: colors.copperDeep,

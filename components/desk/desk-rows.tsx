@@ -43,7 +43,7 @@ const styles = StyleSheet.create({
   ruled: { borderTopWidth: border.hair, borderColor: colors.rule },
   changed: { backgroundColor: colors.copperWash, borderRadius: radius.tag, marginHorizontal: -6, paddingHorizontal: 6 },
   name: { flex: 1, minWidth: 0 },
-  value: { flex: 1, minWidth: 0, alignItems: 'flex-end' },
+  value: { maxWidth: '58%', minWidth: 0, alignItems: 'flex-end' },
   text: { fontSize: 15, lineHeight: 21 },
   unseen: { position: 'absolute', width: 1, height: 1, overflow: 'hidden' },
   struck: { textDecorationLine: 'line-through', textAlign: 'right' },

@@ -43,7 +43,8 @@ function LeadFacts({ lead, nowMs }: { readonly lead: LeadRow; readonly nowMs: nu
 
 const styles = StyleSheet.create({
   card: {
-    gap: space[2], padding: 14, borderRadius: radius.button, borderWidth: border.hair, borderColor: colors.rule, backgroundColor: colors.card,
+    gap: space[2], padding: 14,
+    borderRadius: radius.button, borderWidth: border.hair, borderColor: colors.rule, backgroundColor: colors.card,
   },
   head: { flexDirection: 'row', alignItems: 'center', gap: space[3] },
   foot: {

@@ -33,7 +33,7 @@ export function RangeCell({ lead, tape }: { readonly lead: LeadRow; readonly tap
       {tape ? (
         <View style={styles.tape}><MiniTape lowCents={lead.lowCents} highCents={lead.highCents} firmCents={lead.firmCents} /></View>
       ) : null}
-      <Text weight={700} style={styles.cell}>{dollarRange(lead.lowCents, lead.highCents)}</Text>
+      <Text weight={700} numberOfLines={1} style={[styles.cell, styles.whole]}>{dollarRange(lead.lowCents, lead.highCents)}</Text>
     </View>
   );
 }
@@ -43,7 +43,7 @@ export function DueCell({ lead, nowMs }: { readonly lead: LeadRow; readonly nowM
   const due = lead.stage === 'closed' ? null : timeLeft(lead.dueAt, nowMs);
   return (
     <View>
-      {due ? <Text weight={800} color={due.late ? 'stop' : 'ink'} style={styles.cell}>{due.words}</Text> : null}
+      {due ? <Text weight={800} numberOfLines={1} color={due.late ? 'stop' : 'ink'} style={styles.cell}>{due.words}</Text> : null}
       {lead.timeNote ? <Text variant="note" weight={500} color="ink2">{lead.timeNote}</Text> : null}
     </View>
   );
@@ -51,11 +51,12 @@ export function DueCell({ lead, nowMs }: { readonly lead: LeadRow; readonly nowM
 
 const styles = StyleSheet.create({
   box: {
-    alignSelf: 'flex-start', alignItems: 'center', minWidth: 46, paddingHorizontal: 7, paddingVertical: 4,
+    alignSelf: 'center', alignItems: 'center', minWidth: 46, paddingHorizontal: 7, paddingVertical: 4,
     borderRadius: radius.tag, borderWidth: border.control, borderColor: colors.ink3,
   },
   large: { paddingHorizontal: 10, paddingVertical: 6 },
   cell: { fontSize: 15, lineHeight: 21 },
   range: { flexDirection: 'row', alignItems: 'center', gap: 12 },
-  tape: { width: 150, flexShrink: 1, minWidth: 96 },
+  whole: { flexShrink: 0 },
+  tape: { width: 124, flexShrink: 1, minWidth: 96 },
 });

@@ -14,7 +14,7 @@ import { CircuitCard, LoadCard, PickListCard } from './lead-work';
 import { MoveStage, type MoveStageProps } from './move-stage';
 
 /** A lead's parts: evidence, facts and price side by side on wide windows; below, what they rest on. One column on phones. */
-export function LeadColumns({ lead, nowMs, onReload, reloading }: MoveStageProps & { readonly nowMs: number }) {
+export function LeadColumns({ lead, nowMs, csrfToken, onReload, reloading }: MoveStageProps & { readonly nowMs: number }) {
   const breakpoint = useBreakpoint();
   const [shown, setShown] = useState('label');
   const option = takenOption(lead);
@@ -25,21 +25,21 @@ export function LeadColumns({ lead, nowMs, onReload, reloading }: MoveStageProps
       <GaragePlan plan={lead.quote.plan} maxHeightPx={320} />
     </DeskCard>
   ) : null;
-  const stage = lead.moves.length > 0 ? <MoveStage lead={lead} onReload={onReload} reloading={reloading} /> : null;
+  const stage = lead.moves.length > 0 ? <MoveStage lead={lead} csrfToken={csrfToken} onReload={onReload} reloading={reloading} /> : null;
   const contact = <LeadContact lead={lead} timeZone={timeZone} nowMs={nowMs} />;
   const facts = <LeadFacts lead={lead} onShowPhoto={setShown} />;
   const price = <LeadPrice lead={lead} />;
   const history = <LeadHistory lead={lead} timeZone={timeZone} nowMs={nowMs} />;
   const offered = lead.quote?.options ?? [];
   const options = offered.length > 1 ? <DeskCard title="Options"><OptionTable options={offered} /></DeskCard> : null;
-  const work = option ? [LoadCard, CircuitCard, PickListCard].map((Part) => <Part key={Part.name} option={option} />) : [];
+  const work = option ? [LoadCard, CircuitCard, PickListCard].map((Part, index) => <Part key={`${index}`} option={option} />) : [];
   if (breakpoint === 'wide') {
     return (
       <>
         <View style={styles.row}>
           <View style={[styles.column, styles.narrow]}>{photos}{plan}{contact}</View>
-          <View style={[styles.column, styles.middle]}>{stage}{facts}</View>
-          <View style={[styles.column, styles.rest]}>{price}{history}</View>
+          <View style={[styles.column, styles.middle]}>{stage}{facts}{history}</View>
+          <View style={[styles.column, styles.rest]}>{price}</View>
         </View>
         {options}
         <View style={styles.row}>{work.map((card) => <View key={card.key} style={[styles.column, styles.rest]}>{card}</View>)}</View>

@@ -6,7 +6,6 @@ import type { QuoteDocument, QuoteOption } from '../../shared/quote';
 import { dayInWords } from '../price/dates';
 import { Tape } from '../price/tape';
 import { space } from '../theme/tokens';
-import { CautionBox } from '../ui/caution-box';
 import { Select } from '../ui/select';
 import { Text } from '../ui/text';
 import { DeskCard } from './desk-card';
@@ -60,7 +59,7 @@ function NoPrice({ document }: { readonly document: QuoteDocument | null }) {
     <DeskCard title="Price, line by line">
       <Text variant="subheading">No automatic price</Text>
       {document && document.flags.length > 0 ? (
-        document.flags.map((flag) => <CautionBox key={flag.id} level={flag.danger ? 'stop' : 'note'}>{flag.deskWords}</CautionBox>)
+        document.flags.map((flag) => <Text key={flag.id}>{flag.deskWords}</Text>)
       ) : (
         <Text color="ink2">The homeowner asked for a visit before a price was made.</Text>
       )}

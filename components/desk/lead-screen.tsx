@@ -12,10 +12,13 @@ import { LeadColumns } from './lead-columns';
 import { LeadHead } from './lead-head';
 import { LeadNotices } from './lead-notices';
 import { LoadFailure } from './load-failure';
+import { SignedIn } from './signed-in';
 import { useNow } from './use-now';
 
 /** One lead: everything the desk knows of it. */
-export function LeadScreen() {
+export const LeadScreen = () => <SignedIn>{({ csrfToken }) => <OneLead csrfToken={csrfToken} />}</SignedIn>;
+
+function OneLead({ csrfToken }: { readonly csrfToken: string }) {
   const params = useLocalSearchParams<{ id: string }>();
   const lead = useLead(params.id);
   const nowMs = useNow();
@@ -31,7 +34,7 @@ export function LeadScreen() {
     <DeskPage title={`${lead.data.jobNumber} ${lead.data.name}`}>
       <LeadHead lead={lead.data} backHref={backHref} nowMs={nowMs} />
       <LeadNotices lead={lead.data} />
-      <LeadColumns lead={lead.data} nowMs={nowMs} reloading={lead.isFetching} onReload={() => void lead.refetch()} />
+      <LeadColumns lead={lead.data} nowMs={nowMs} csrfToken={csrfToken} reloading={lead.isFetching} onReload={() => void lead.refetch()} />
     </DeskPage>
   );
 }

@@ -1,3 +1,4 @@
+import { View } from 'react-native';
 import type { LeadRow } from '../../shared/api/desk';
 import { dollars } from '../../shared/money';
 import type { LeadSort } from '../api/use-leads';
@@ -28,8 +29,12 @@ export function LeadTable({ leads, sort, onSort, nowMs, hrefOf }: LeadTableProps
   const columns: Column<LeadRow>[] = [
     { key: 'job', title: 'Job', cell: (lead) => <JobBox jobNumber={lead.jobNumber} /> },
     { key: 'name', title: 'Homeowner', sortable: true, cell: (lead) => <TwoLines strong first={lead.name} second={lead.town} /> },
-    { key: 'work', title: 'Work', cell: (lead) => <TwoLines first={lead.work} second={lead.workNote} /> },
-    { key: 'price', title: wide ? 'Range shown, firm price marked' : 'Range shown', sortable: true, cell: (lead) => <RangeCell lead={lead} tape={wide} /> },
+    ...(wide ? [
+      { key: 'work', title: 'Work', cell: (lead: LeadRow) => <TwoLines first={lead.work} second={lead.workNote} /> },
+      { key: 'price', title: 'Range shown, firm price marked', sortable: true, cell: (lead: LeadRow) => <RangeCell lead={lead} tape /> },
+    ] : [
+      { key: 'price', title: 'Work, range shown', sortable: true, cell: (lead: LeadRow) => <WorkAndRange lead={lead} /> },
+    ]),
     ...(wide ? [{ key: 'firm', title: 'Firm', align: 'right' as const, cell: (lead: LeadRow) => <Firm lead={lead} /> }] : []),
     { key: 'stage', title: 'Stage', cell: (lead) => <StageTag stage={lead.stage} /> },
     { key: 'due', title: 'Time', sortable: true, cell: (lead) => <DueCell lead={lead} nowMs={nowMs} /> },
@@ -42,6 +47,13 @@ export function LeadTable({ leads, sort, onSort, nowMs, hrefOf }: LeadTableProps
     />
   );
 }
+
+const WorkAndRange = ({ lead }: { readonly lead: LeadRow }) => (
+  <View>
+    <TwoLines first={lead.work} />
+    <RangeCell lead={lead} tape={false} />
+  </View>
+);
 
 function Firm({ lead: { firmCents } }: { readonly lead: LeadRow }) {
   const none = firmCents === null;

@@ -2,6 +2,7 @@ import type { QuoteOption } from '../../shared/quote';
 import { LoadSheetView } from '../price/load-sheet-view';
 import { DeskCard } from './desk-card';
 import { DeskRows } from './desk-rows';
+import { quantityInWords } from './quantity-words';
 
 /** The load calculation as a permit office reads it. */
 export const LoadCard = ({ option }: { readonly option: QuoteOption }) => (
@@ -20,7 +21,7 @@ export const PickListCard = ({ option }: { readonly option: QuoteOption }) => (
   <DeskCard title="Pick list" aside={`${option.laborHours.toLocaleString('en-US', { maximumFractionDigits: 1 })}\u00a0h of work`}>
     <DeskRows
       label="Pick list"
-      rows={option.takeoff.map(({ words, quantity, unit }, index) => ({ key: `${index}`, title: words, value: `${quantity.toLocaleString('en-US')} ${unit}` }))}
+      rows={option.takeoff.map(({ words, quantity, unit }, index) => ({ key: `${index}`, title: words, value: quantityInWords(quantity, unit) }))}
     />
   </DeskCard>
 );

@@ -10,14 +10,17 @@ import { DeskPage } from './desk-page';
 import { sortWords, useAddressFilters } from './lead-filters';
 import { LeadResults } from './lead-results';
 import { SearchBox } from './search-box';
-import { useDesk } from './session-context';
+import { useLeadSearch } from './search-context';
+import { SignedIn } from './signed-in';
 
 const ALL = 'all';
 const sorts = Object.entries(sortWords).map(([value, label]) => ({ value, label }));
 
 /** The leads: by stage, searched, sorted, page by page. */
-export function LeadsScreen() {
-  const { search, setSearch } = useDesk();
+export const LeadsScreen = () => <SignedIn>{() => <Leads />}</SignedIn>;
+
+function Leads() {
+  const { search, setSearch } = useLeadSearch();
   const { stage, sort, set } = useAddressFilters();
   const leads = useLeads({ stage, search, sort });
   const phone = useBreakpoint() === 'phone';

@@ -12,19 +12,18 @@ import { Select } from '../ui/select';
 import { Text } from '../ui/text';
 import { DeskCard } from './desk-card';
 import { StageTag } from './stage-tag';
-import { useDesk } from './session-context';
 
 export interface MoveStageProps {
   readonly lead: Lead;
+  readonly csrfToken: string;
   /** Fetches the lead anew. */
   readonly onReload: () => void;
   readonly reloading: boolean;
 }
 
 /** Moves the lead to a stage that is open from here. When somebody was faster it says so, keeps the choice, and offers the newest state. */
-export function MoveStage({ lead, onReload, reloading }: MoveStageProps) {
-  const { session } = useDesk();
-  const move = useMoveLead(lead.id, session.csrfToken);
+export function MoveStage({ lead, csrfToken, onReload, reloading }: MoveStageProps) {
+  const move = useMoveLead(lead.id, csrfToken);
   const [picked, setPicked] = useState<LeadStage | null>(null);
   const [note, setNote] = useState('');
   const [moved, setMoved] = useState('');

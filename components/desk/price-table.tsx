@@ -9,6 +9,7 @@ import { Directory } from '../ui/directory';
 import { Disclosure } from '../ui/disclosure';
 import { NumberBox } from '../ui/number-box';
 import { Text } from '../ui/text';
+import { quantityInWords } from './quantity-words';
 
 interface Row extends Pick<QuoteLine, 'lowCents' | 'midCents' | 'highCents'> {
   readonly key: string;
@@ -66,7 +67,7 @@ function Rules({ line }: { readonly line: QuoteLine }) {
           <View key={`${rule.rule}-${index}`} role="listitem">
             <Text variant="fine" weight={700}>{rule.words}</Text>
             <Text variant="fine" weight={500} color="ink2">
-              {`${rule.quantity.toLocaleString('en-US')} ${rule.unit} at ${dollars(rule.unitCents)} = ${dollars(rule.cents)} · ${rule.rule}`}
+              {`${quantityInWords(rule.quantity, rule.unit)} at ${dollars(rule.unitCents)} = ${dollars(rule.cents)} · ${rule.rule}`}
             </Text>
           </View>
         ))}

@@ -18,9 +18,11 @@ export function RailTile({ number, title, href, count, current, folded }: RailTi
   const counted = count === undefined ? '' : String(count);
   return (
     <View>
-      <View aria-hidden style={[styles.join, current && styles.joined]} />
-      <Anchor href={href} current={current ? 'page' : undefined} spokenLabel={`${number} ${title}${counted ? `, ${counted} open` : ''}`}
-        style={({ pressed }) => [styles.tile, current ? styles.current : styles.other, folded && styles.folded, pressed && styles.pressed]}>
+      {folded ? null : <View aria-hidden style={[styles.join, current && styles.joined]} />}
+      <Anchor
+        href={href} current={current ? 'page' : undefined} spokenLabel={folded ? `${number} ${title}` : undefined}
+        style={({ pressed }) => [styles.tile, current ? styles.current : styles.other, folded && styles.folded, pressed && styles.pressed]}
+      >
         <View style={[styles.number, { backgroundColor: current ? colors.spruce : colors.spruceDeep }]}>
           <Text variant="fine" weight={800} color="paper">{String(number)}</Text>
         </View>

@@ -1,3 +1,4 @@
+import { View } from 'react-native';
 import { leadStageWords, type LeadStage } from '../../shared/api/desk';
 import { StatusTag, type StatusKind } from '../ui/status-tag';
 
@@ -6,5 +7,7 @@ const KINDS: Readonly<Record<LeadStage, StatusKind>> = {
   accepted: 'accepted', booked: 'booked', closed: 'quiet',
 };
 
-/** Where a lead stands. */
-export const StageTag = ({ stage }: { readonly stage: LeadStage }) => <StatusTag kind={KINDS[stage]} label={leadStageWords[stage]} />;
+/** Where a lead stands; as wide as its words, in a table's cell too. */
+export const StageTag = ({ stage }: { readonly stage: LeadStage }) => (
+  <View style={{ flexDirection: 'row' }}><StatusTag kind={KINDS[stage]} label={leadStageWords[stage]} /></View>
+);

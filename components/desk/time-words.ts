@@ -17,7 +17,7 @@ export interface TimeLeft { readonly words: string; readonly late: boolean }
 export function timeLeft(dueAt: string | null, nowMs: number): TimeLeft | null {
   if (dueAt === null) return null;
   const ms = Date.parse(dueAt) - nowMs;
-  return ms < 0 ? { words: `${spanInWords(-ms)} late`, late: true } : { words: `${spanInWords(ms)} left`, late: false };
+  return ms < 0 ? { words: `${spanInWords(-ms)}\u00a0late`, late: true } : { words: `${spanInWords(ms)}\u00a0left`, late: false };
 }
 
 const dayIn = (ms: number, timeZone: string) => new Date(ms).toLocaleDateString('en-CA', { timeZone });

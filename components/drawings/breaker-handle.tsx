@@ -19,7 +19,8 @@ export function BreakerHandle({ state, dark = false }: { readonly state: HandleS
       aria-hidden
       style={[
         styles.slot,
-        on ? { backgroundColor: colors.copper, borderColor: colors.copper } : { backgroundColor: dark ? colors.spruceDeep : colors.card, borderColor: dark ? colors.edgeDark : colors.edge },
+        on && { backgroundColor: colors.copper, borderColor: colors.copper },
+        !on && { backgroundColor: dark ? colors.spruceDeep : colors.card, borderColor: dark ? colors.edgeDark : colors.edge },
       ]}
     >
       <View dataSet={{ slides: 'handle' }} style={[styles.knob, knob, { left: KNOB_LEFT[state] }]} />

@@ -29,6 +29,16 @@ export function PanelDoorDrawing() {
 
 const DOOR = '#D9D6C7';
 
+/** One breaker; its knob so far from its left end. */
+function Breaker({ x, y, knob }: { x: number; y: number; knob: number }) {
+  return (
+    <G>
+      <Rect x={x} y={y} width={34} height={17} rx={4} fill={colors.spruce} />
+      <Rect x={x + knob} y={y + 4} width={11} height={9} rx={2.5} fill={colors.card} />
+    </G>
+  );
+}
+
 function OpenDoor() {
   const edge = { stroke: colors.ink, strokeWidth: 2.6, strokeLinejoin: 'round' } as const;
   return (
@@ -46,9 +56,9 @@ function OpenDoor() {
         const blank = row === 2;
         return (
           <G key={row}>
-            <Rect x={111} y={y} width={34} height={17} rx={4} fill={colors.spruce} /><Rect x={130} y={y + 4} width={11} height={9} rx={2.5} fill={colors.card} />
+            <Breaker x={111} y={y} knob={19} />
             {blank ? <Rect x={159} y={y} width={34} height={17} rx={4} fill="#BFC6BF" stroke={colors.ink2} strokeWidth={1.6} strokeDasharray="4 3" /> : (
-              <><Rect x={159} y={y} width={34} height={17} rx={4} fill={colors.spruce} /><Rect x={163} y={y + 4} width={11} height={9} rx={2.5} fill={colors.card} /></>
+              <Breaker x={159} y={y} knob={4} />
             )}
           </G>
         );
@@ -68,8 +78,8 @@ function OpenDoor() {
 const styles = StyleSheet.create({
   picture: { flexDirection: 'row', alignItems: 'center', backgroundColor: colors.sage, borderRadius: radius.card, overflow: 'hidden', paddingRight: space[3], minHeight: 140 },
   left: { flex: 1, paddingLeft: space[4], maxWidth: 200 },
-  drawing: { flexGrow: 1, flexBasis: 200, height: 156, marginLeft: space[3], alignSelf: 'flex-end' },
-  right: { flexShrink: 1, flexBasis: 128, gap: 2, paddingLeft: space[2] },
+  drawing: { flexGrow: 1, flexShrink: 1, flexBasis: 200, minWidth: 0, height: 156, marginLeft: space[3], alignSelf: 'flex-end' },
+  right: { flexShrink: 0, width: 122, gap: 2, paddingLeft: space[2] },
   blank: { flexDirection: 'row', alignItems: 'center', gap: space[2], paddingTop: space[3] },
   blankBox: { width: 24, height: 13, borderRadius: 3, borderWidth: 1.5, borderStyle: 'dashed', borderColor: colors.ink2 },
 });

@@ -5,7 +5,8 @@ type Props = Readonly<Record<string, unknown>> & { readonly children?: ReactNode
 
 /** One SVG element of the browser under react-native-svg's name. Both use the same attribute names. */
 const element = (tag: string) => {
-  const Element = ({ style, testID: _testID, ...props }: Props) => createElement(tag, style ? { ...props, style: StyleSheet.flatten(style) } : props);
+  const Element = ({ style, testID: _testID, ...props }: Props) =>
+    createElement(tag, style ? { ...props, style: StyleSheet.flatten(style) } : props);
   Element.displayName = tag;
   return Element;
 };

@@ -28,7 +28,8 @@ export function LandingScreen() {
           </View>
           <View dataSet={{ only: 'wide' }} style={{ maxWidth: 520 }}>
             <Text color="ink2" style={styles.leadWide}>
-              Describe your home, car, panel and garage from the couch. See an honest price range narrow as you answer. No account, about 6 minutes.
+              Describe your home, car, panel and garage from the couch. See an honest price range narrow as you answer.
+              No account, about 6 minutes.
             </Text>
           </View>
           <OpeningRange company={company} />
@@ -44,7 +45,10 @@ export function LandingScreen() {
 const styles = StyleSheet.create({
   picture: { height: 320, overflow: 'hidden', backgroundColor: colors.sage },
   fill: { width: '100%', height: '100%' },
-  words: { gap: space[4], backgroundColor: colors.paper, borderTopLeftRadius: radius.picture, borderTopRightRadius: radius.picture, marginTop: -24, paddingHorizontal: space[4], paddingTop: space[6] },
+  words: {
+    gap: space[4], backgroundColor: colors.paper, borderTopLeftRadius: radius.picture, borderTopRightRadius: radius.picture, marginTop: -24,
+    paddingHorizontal: space[4], paddingTop: space[6],
+  },
   lead: { fontSize: 17 },
   leadWide: { fontSize: 19, lineHeight: 30 },
 });

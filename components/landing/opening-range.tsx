@@ -19,6 +19,9 @@ export function OpeningRange({ company }: { readonly company: Company | undefine
 }
 
 const styles = StyleSheet.create({
-  card: { backgroundColor: colors.card, borderWidth: border.hair, borderColor: colors.rule, borderRadius: radius.card, padding: space[4], paddingBottom: space[2] },
+  card: {
+    backgroundColor: colors.card, borderWidth: border.hair, borderColor: colors.rule, borderRadius: radius.card,
+    padding: space[4], paddingBottom: space[2],
+  },
   line: { flexDirection: 'row', justifyContent: 'space-between', alignItems: 'baseline', gap: space[3] },
 });

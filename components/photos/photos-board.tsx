@@ -16,7 +16,8 @@ export default function PhotosBoard() {
   useEffect(() => { void readyPickers(); }, []);
   const photos = intake?.photos ?? [];
   const wanted = mostWanted(intake?.range.narrowing ?? [], new Set(photos.map((photo) => photo.slot)));
-  const rows = Array.from({ length: Math.ceil(photoSlots.length / columns) }, (_, row) => photoSlots.slice(row * columns, (row + 1) * columns));
+  const rowCount = Math.ceil(photoSlots.length / columns);
+  const rows = Array.from({ length: rowCount }, (_, row) => photoSlots.slice(row * columns, (row + 1) * columns));
   return (
     <View style={{ gap: space[3] }}>
       {rows.map((row) => (

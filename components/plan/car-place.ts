@@ -45,6 +45,7 @@ export function cableWay(plan: PlanDrawing, charger: PointFt): readonly PointFt[
     const needed = corners.findIndex((corner) => !crosses(box, corner, charger));
     return [charger, ...corners.slice(0, needed + 1).reverse(), port];
   });
-  const length = (way: readonly PointFt[]) => way.slice(1).reduce((sum, point, index) => sum + Math.hypot(point.x - (way[index]?.x ?? 0), point.y - (way[index]?.y ?? 0)), 0);
+  const length = (way: readonly PointFt[]) =>
+    way.slice(1).reduce((sum, point, index) => sum + Math.hypot(point.x - (way[index]?.x ?? 0), point.y - (way[index]?.y ?? 0)), 0);
   return ways.reduce((best, way) => (length(way) < length(best) ? way : best));
 }

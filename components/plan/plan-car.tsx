@@ -41,8 +41,8 @@ export function ReachWords({ plan, view }: Props) {
   const tone = cable.reaches ? 'lake' : 'stop';
   return (
     <G>
-      <PlanText x={x} y={y - 4} color={tone}>{cable.reaches ? `${feetInWords(plan.cableLengthFt)} cable` : `${feetInWords(cable.shortFt)} short`}</PlanText>
-      <PlanText x={x} y={y + 13} color={tone} weight={500}>{cable.reaches ? 'reaches here' : `of ${feetInWords(plan.cableLengthFt)} cable`}</PlanText>
+      <PlanText x={x} y={y - 4} color={tone} halo>{cable.reaches ? `${feetInWords(plan.cableLengthFt)} cable` : `${feetInWords(cable.shortFt)} short`}</PlanText>
+      <PlanText x={x} y={y + 13} color={tone} weight={500} halo>{cable.reaches ? 'reaches here' : 'of cable'}</PlanText>
     </G>
   );
 }
@@ -82,6 +82,7 @@ export function Cable({ plan, view }: Props) {
   const way = cableWay(plan, inside(room, onWall(room, charger.wall, charger.alongFt), 0.8)).map(view.px);
   const port = view.px(portPlace(plan));
   const tone = cable.reaches ? colors.lake : colors.stop;
+  const ring = { stroke: colors.lake, strokeWidth: view.compact ? 2 : 3 } as const;
   const [first, last] = [way[0], way.at(-1)];
   const hangs = way.length === 2 && first && last
     ? `M${first.x} ${first.y}Q${first.x} ${(first.y + last.y) / 2} ${last.x} ${last.y}`
@@ -89,7 +90,7 @@ export function Cable({ plan, view }: Props) {
   return (
     <G>
       <Path d={hangs} fill="none" stroke={tone} strokeWidth={view.compact ? 2 : 2.6} strokeLinecap="round" {...(cable.reaches ? {} : { strokeDasharray: '6 5' })} />
-      <Circle cx={port.x} cy={port.y} r={view.compact ? 4 : 8} fill={colors.white} stroke={colors.lake} strokeWidth={view.compact ? 2 : 3} />
+      <Circle cx={port.x} cy={port.y} r={view.compact ? 4 : 8} fill={colors.white} {...ring} />
     </G>
   );
 }

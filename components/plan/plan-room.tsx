@@ -12,7 +12,8 @@ export function Floor({ plan: { room }, view }: Props) {
   const { left, top, scale } = view;
   const [width, depth] = [room.widthFt * scale, room.depthFt * scale];
   const lines = (lengthFt: number) => Array.from({ length: Math.max(0, Math.ceil(lengthFt) - 1) }, (_, index) => index + 1);
-  const stroke = (ft: number) => (ft % 5 === 0 ? { stroke: colors.planGrid5, strokeWidth: 1.2 } : { stroke: colors.planGrid, strokeWidth: 1 });
+  const stroke = (ft: number) =>
+    (ft % 5 === 0 ? { stroke: colors.planGrid5, strokeWidth: 1.2 } : { stroke: colors.planGrid, strokeWidth: 1 });
   return (
     <G>
       <Rect x={left} y={top} width={width} height={depth} fill={colors.card} />

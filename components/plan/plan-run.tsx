@@ -37,7 +37,8 @@ function straps(way: readonly PointFt[], width: number, scale: number): readonly
     const count = Math.floor(Math.max(0, length - 3 * width) / (STRAP_EACH_FT * scale)) + (length > 6 * width ? 1 : 0);
     return Array.from({ length: count }, (_, strap) => {
       const share = (strap + 1) / (count + 1);
-      return { x: from.x + (to.x - from.x) * share, y: from.y + (to.y - from.y) * share, upright: Math.abs(to.x - from.x) > Math.abs(to.y - from.y) };
+      const [byX, byY] = [to.x - from.x, to.y - from.y];
+      return { x: from.x + byX * share, y: from.y + byY * share, upright: Math.abs(byX) > Math.abs(byY) };
     });
   });
 }
@@ -98,15 +99,16 @@ function Dimension({ view, room, wall, fromFt, toFt, color }: { view: View; room
   const words = feetInWords(toFt - fromFt);
   const half = words.length * 3.8 + 6;
   const stroke = { stroke: colors[color], strokeWidth: 1.3 } as const;
-  const slash = ({ x, y }: PointFt, key: string) => <Line key={key} x1={x - 4} y1={y + 4} x2={x + 4} y2={y - 4} {...stroke} strokeWidth={2} />;
-  const [near, far] = level ? [{ x: middle.x - half, y: a.y }, { x: middle.x + half, y: a.y }] : [{ x: a.x, y: middle.y - half }, { x: a.x, y: middle.y + half }];
+  const [byX, byY] = level ? [half, 0] : [0, half];
+  const [near, far] = [{ x: middle.x - byX, y: middle.y - byY }, { x: middle.x + byX, y: middle.y + byY }];
   return (
     <G>
       <Line x1={a.x} y1={a.y} x2={near.x} y2={near.y} {...stroke} />
       <Line x1={far.x} y1={far.y} x2={b.x} y2={b.y} {...stroke} />
-      {slash(a, 'a')}
-      {slash(b, 'b')}
-      {level ? <PlanText x={middle.x} y={middle.y + 4.5} color={color} weight={800}>{words}</PlanText> : <PlanText x={middle.x + 4.5} y={middle.y} color={color} weight={800} turn={-90}>{words}</PlanText>}
+      {[a, b].map(({ x, y }, end) => <Line key={end} x1={x - 4} y1={y + 4} x2={x + 4} y2={y - 4} {...stroke} strokeWidth={2} />)}
+      <PlanText x={middle.x + (level ? 0 : 4.5)} y={middle.y + (level ? 4.5 : 0)} color={color} weight={800} turn={level ? 0 : -90}>
+        {words}
+      </PlanText>
     </G>
   );
 }

@@ -6,6 +6,7 @@ import { contactSchema, type Contact } from '../../shared/api/intakes';
 import { consent } from '../../shared/consent';
 import { failureWords, newIdempotencyKey, problemByField } from '../api/client';
 import { space } from '../theme/tokens';
+import { afterPress } from '../ui/after-press';
 import { Button } from '../ui/button';
 import { CautionBox } from '../ui/caution-box';
 import { Checkbox } from '../ui/checkbox';
@@ -87,7 +88,7 @@ function Box({ control, name, ...box }: { readonly control: Control<Contact> } &
     <Controller
       control={control}
       name={name}
-      render={({ field, fieldState }) => <Field id={name} {...box} value={field.value ?? ''} onChangeText={field.onChange} onBlur={field.onBlur} error={fieldState.error?.message ?? null} />}
+      render={({ field, fieldState }) => <Field id={name} {...box} value={field.value ?? ''} onChangeText={field.onChange} onBlur={() => afterPress(field.onBlur)} error={fieldState.error?.message ?? null} />}
     />
   );
 }

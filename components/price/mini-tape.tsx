@@ -3,8 +3,14 @@ import { dollars, spokenRange } from '../../shared/money';
 import { colors } from '../theme/tokens';
 import { placeOn, wizardScale } from './tape-scale';
 
+interface MiniTapeProps {
+  readonly lowCents: number;
+  readonly highCents: number;
+  readonly firmCents?: number | null;
+}
+
 /** A range as a short tape for tables, the firm price as an ink bar; the numbers stand beside it. */
-export function MiniTape({ lowCents, highCents, firmCents = null }: { readonly lowCents: number; readonly highCents: number; readonly firmCents?: number | null }) {
+export function MiniTape({ lowCents, highCents, firmCents = null }: MiniTapeProps) {
   const [from, to] = [placeOn(wizardScale, lowCents), placeOn(wizardScale, highCents)];
   return (
     <View role="img" aria-label={`Range ${spokenRange(lowCents, highCents)}${firmCents === null ? '' : `, firm price ${dollars(firmCents)}`}`} style={styles.tape}>

@@ -21,9 +21,13 @@ export function ticks(scale: Scale): readonly Tick[] {
   });
 }
 
-/** Labels that fit: each $1,000 (each $500 on a long tape), none under a pin. `widthPx` is the scale's own length. */
+/**
+ * Labels that fit: each $1,000 (each $500 on a long tape, each $2,000 on a very short one), none under a pin.
+ * `widthPx` is the scale's own length.
+ */
 export function labels(scale: Scale, widthPx: number, pins: readonly number[]): readonly Tick[] {
-  const every = (widthPx / (scale.toCents - scale.fromCents)) * 50_000 >= 58 ? 50_000 : 100_000;
+  const per500Px = (widthPx / (scale.toCents - scale.fromCents)) * 50_000;
+  const every = per500Px >= 58 ? 50_000 : per500Px >= 24 ? 100_000 : 200_000;
   const halfLabelPx = 22;
   return ticks(scale).filter(({ cents, place }) => {
     if (cents % every !== 0 || place < (halfLabelPx / widthPx) * 100 || place > 100 - (halfLabelPx / widthPx) * 100) return false;

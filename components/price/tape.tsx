@@ -40,7 +40,10 @@ export function Tape({ lowCents, highCents, previous = null, outcome = 'range', 
     <View role="img" aria-label={name} style={styles.tape}>
       <View style={[styles.blade, { right: zoomed ? 0 : CASE_WIDTH - 8 }]}><Blade /></View>
       <View style={[styles.hook, dark && { backgroundColor: colors.mist, borderColor: colors.mist }]} />
-      <View style={[styles.scale, { right: zoomed ? 16 : CASE_WIDTH + 8 }]} onLayout={(event) => setWidthPx(event.nativeEvent.layout.width)}>
+      <View
+        style={[styles.scale, { right: zoomed ? 16 : CASE_WIDTH + 8 }]}
+        onLayout={(event) => setWidthPx(event.nativeEvent.layout.width || widthPx)}
+      >
         {previous && shown ? <Hatched from={placeOn(scale, previous.lowCents)} to={placeOn(scale, previous.highCents)} /> : null}
         {shown && !firm ? <View dataSet={{ slides: 'tape' }} style={[styles.segment, { left: `${from}%`, right: `${100 - to}%` }]}><View style={styles.bar} /></View> : null}
         <Svg width="100%" height={24} style={styles.ticks} aria-hidden>

@@ -12,7 +12,7 @@ import { Link } from '../ui/link';
 import { Page } from '../ui/page';
 import { Skeleton } from '../ui/skeleton';
 import { Text } from '../ui/text';
-import { ContactForm } from './contact-form';
+import { ContactForm } from './contact-form-later';
 import { Failure } from './failure';
 import { NoIntake } from './no-intake';
 

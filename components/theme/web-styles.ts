@@ -66,7 +66,7 @@ const table = [
   `.ui-table th,.ui-table td{padding:9px 12px;vertical-align:middle;font-weight:inherit}.ui-table thead th{${font(800, 13, 18)};color:${colors.ink2};border-bottom:2px solid ${colors.ink};white-space:nowrap}`,
   `.ui-table tbody tr{border-top:1px solid ${colors.rule}}.ui-table tbody tr:first-child{border-top:0}.ui-table tbody tr:hover{background:${colors.well}}`,
   `.ui-table tbody tr[aria-current]{background:${colors.spruceWash};box-shadow:inset 4px 0 ${colors.copper}}`,
-  '.ui-right{text-align:right}.ui-table .ui-right>*{align-items:flex-end;margin-left:auto}.ui-row-link{text-decoration:none;color:inherit;display:inline-flex;min-height:44px;min-width:44px;align-items:center}',
+  '.ui-right{text-align:right}.ui-table .ui-right>*{align-items:flex-end;margin-left:auto}.ui-table .ui-row-link{text-decoration:none;color:inherit;display:inline-flex;min-height:44px;min-width:44px;align-items:center}',
   `.ui-sort{all:unset;cursor:pointer;display:inline-flex;gap:4px;align-items:center;min-height:32px;${font(800, 13, 18)};color:${colors.ink}}`,
 ].join('');
 

@@ -1,3 +1,4 @@
+import type { Ref } from 'react';
 import { Pressable, StyleSheet, View } from 'react-native';
 import { BreakerHandle } from '../drawings/breaker-handle';
 import { LoadGlyph } from '../drawings/load-glyphs';
@@ -15,6 +16,7 @@ export interface Tile {
 }
 
 interface Props {
+  readonly ref?: Ref<View>;
   readonly tile: Tile;
   readonly number: number;
   readonly onPress: () => void;
@@ -22,12 +24,13 @@ interface Props {
 }
 
 /** One load on the board: number, glyph, state in a word, handle, name. */
-export function BreakerTile({ tile, number, onPress, onMenu }: Props) {
+export function BreakerTile({ ref, tile, number, onPress, onMenu }: Props) {
   const { state } = tile;
   const words = state === true ? (tile.stateWords ?? 'Yes') : state === null ? 'Unsure' : 'No';
   const quiet = state === true ? 'copper' : state === null ? 'blade' : 'mist';
   return (
     <Pressable
+      {...(ref ? { ref } : {})}
       role="checkbox"
       aria-checked={state === null ? 'mixed' : state}
       aria-label={`${tile.title}. ${state === null ? 'Not sure' : words}`}
@@ -41,7 +44,7 @@ export function BreakerTile({ tile, number, onPress, onMenu }: Props) {
         if (menu) onMenu();
         else onPress();
       }}
-      style={({ pressed }) => [styles.tile, state === true ? styles.on : styles.off, state === null && styles.unsure, pressed && { opacity: 0.85 }]}
+      style={({ pressed }) => [styles.tile, state ? styles.on : styles.off, state === null && styles.unsure, pressed && styles.pressed]}
     >
       <View style={styles.line}>
         <View style={[styles.number, { backgroundColor: state === true ? colors.spruce : colors.spruceDeep }]}>
@@ -61,6 +64,7 @@ const styles = StyleSheet.create({
   on: { backgroundColor: colors.paper, borderColor: colors.paper },
   off: { backgroundColor: colors.breakerOff, borderColor: colors.breakerOff },
   unsure: { borderColor: colors.edgeDark },
+  pressed: { opacity: 0.85 },
   line: { flexDirection: 'row', alignItems: 'center', gap: 5 },
   number: { minWidth: 20, height: 20, borderRadius: 5, alignItems: 'center', justifyContent: 'center', paddingHorizontal: 3 },
   words: { flex: 1, minWidth: 0 },

@@ -20,7 +20,11 @@ export function DataCards<Row>({ caption, columns, rows, rowKey, rowHref, rowLab
         return (
           <View key={rowKey(row)} role="listitem">
             <Card>
-              {rowHref ? <Anchor href={rowHref(row)} spokenLabel={rowLabel?.(row)} style={() => ({ gap: space[2] })}>{body}</Anchor> : <View style={{ gap: space[2] }}>{body}</View>}
+              {rowHref ? (
+                <Anchor href={rowHref(row)} spokenLabel={rowLabel?.(row)} style={() => styles.body}>{body}</Anchor>
+              ) : (
+                <View style={styles.body}>{body}</View>
+              )}
             </Card>
           </View>
         );
@@ -30,6 +34,7 @@ export function DataCards<Row>({ caption, columns, rows, rowKey, rowHref, rowLab
 }
 
 const styles = StyleSheet.create({
+  body: { gap: space[2] },
   line: { flexDirection: 'row', gap: space[3], alignItems: 'flex-start' },
   title: { width: 96, paddingTop: 3 },
 });

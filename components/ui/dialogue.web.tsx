@@ -2,7 +2,10 @@ import { useEffect, useRef } from 'react';
 import type { DialogueProps } from './dialogue';
 import { DialogueBody } from './dialogue-body';
 
-/** The browser's own modal dialog: it keeps the focus inside, gives it back afterwards, and Escape is the safe choice. A sheet on phones. */
+/**
+ * The browser's own modal dialog: it keeps the focus inside, gives it back afterwards, and Escape is the safe choice.
+ * A sheet on phones.
+ */
 export function Dialogue(props: DialogueProps) {
   const { open, onClose } = props;
   const dialog = useRef<HTMLDialogElement>(null);

@@ -58,7 +58,7 @@ function Line({ item, n }: { item: DirectoryItem; n: number | null }) {
   );
   if (!item.href) return <View style={styles.line}>{words}</View>;
   return (
-    <Anchor href={item.href} spokenLabel={item.linkLabel} style={({ pressed }) => [styles.line, styles.target, pressed && { opacity: 0.7 }]}>
+    <Anchor href={item.href} spokenLabel={item.linkLabel} style={({ pressed }) => [styles.line, styles.target, pressed && styles.pressed]}>
       {words}
     </Anchor>
   );
@@ -71,6 +71,7 @@ const styles = StyleSheet.create({
   changed: { backgroundColor: colors.copperWash, borderRadius: radius.tag, paddingHorizontal: space[2], marginHorizontal: -space[2] },
   line: { flexDirection: 'row', gap: space[3], alignItems: 'flex-start', paddingVertical: 2 },
   target: { minHeight: 44, alignItems: 'center' },
+  pressed: { opacity: 0.7 },
   words: { flex: 1, minWidth: 0 },
   value: { textAlign: 'right', flexShrink: 0, maxWidth: '60%' },
 });

@@ -1,7 +1,6 @@
 import type { ReactNode } from 'react';
 import { StyleSheet, View } from 'react-native';
 import { border, colors, radius, shadow, space } from '../theme/tokens';
-import { useLowWindow } from '../theme/use-breakpoint';
 import { Text } from './text';
 
 export interface DockProps {
@@ -16,28 +15,30 @@ export interface DockProps {
   /** A square button or link. */
   readonly back?: ReactNode;
   readonly next: ReactNode;
+  /** Over the dock's upper edge: a toast. */
+  readonly above?: ReactNode;
 }
 
-/** Stays at the window's bottom on phones and tablets. Under 700 px it folds to one line: the range and Next. */
-export function Dock({ range = null, side, tape, line, back, next }: DockProps) {
-  const low = useLowWindow();
+/**
+ * Stays at the window's bottom on phones and tablets. Under 700 px of height it folds to one line, back, range and Next: by the
+ * style sheet (page-styles.ts), so that nothing jumps when scripts arrive or a keyboard comes up.
+ */
+export function Dock({ range = null, side, tape, line, back, next, above }: DockProps) {
   const words = typeof side === 'string' ? <Text variant="note" weight={700} color="ink2">{side}</Text> : side;
   return (
-    <View role="region" aria-label="Price and next step" dataSet={{ part: 'dock' }} style={[styles.dock, low && styles.low]}>
-      <View style={[styles.inner, low && styles.oneLine]}>
-        {low && back ? back : null}
+    <View role="region" aria-label="Price and next step" dataSet={{ part: 'dock' }} style={styles.dock}>
+      {above ? <View style={styles.above}>{above}</View> : null}
+      <View dataSet={{ part: 'dock-inner' }} style={styles.inner}>
         {range ? (
-          <View style={[styles.head, low && { flexShrink: 1 }]}>
-            <Text variant={low ? 'subheading' : 'figure'} style={low ? null : styles.range}>{range}</Text>
-            {low ? null : words}
+          <View dataSet={{ part: 'dock-range' }} style={[styles.whole, styles.head]}>
+            <Text variant="figure" style={styles.range}>{range}</Text>
+            <View dataSet={{ low: 'hide' }}>{words}</View>
           </View>
         ) : null}
-        {low ? null : tape}
-        {low ? null : line}
-        <View style={[styles.buttons, low && { flexGrow: 1, flexShrink: 1, minWidth: 140 }]}>
-          {low ? null : back}
-          {next}
-        </View>
+        {tape ? <View dataSet={{ low: 'hide' }} style={styles.whole}>{tape}</View> : null}
+        {line ? <View dataSet={{ low: 'hide' }} style={styles.whole}>{line}</View> : null}
+        {back ? <View dataSet={{ part: 'dock-back' }}>{back}</View> : null}
+        <View style={styles.next}>{next}</View>
       </View>
     </View>
   );
@@ -45,13 +46,13 @@ export function Dock({ range = null, side, tape, line, back, next }: DockProps) 
 
 const styles = StyleSheet.create({
   dock: {
-    backgroundColor: colors.card, borderTopLeftRadius: radius.sheet, borderTopRightRadius: radius.sheet, borderTopWidth: border.hair, borderColor: colors.rule,
-    boxShadow: shadow.dock, paddingHorizontal: space[4], paddingTop: space[3], paddingBottom: space[4], zIndex: 10,
+    backgroundColor: colors.card, borderTopLeftRadius: radius.sheet, borderTopRightRadius: radius.sheet, borderTopWidth: border.hair,
+    borderColor: colors.rule, boxShadow: shadow.dock, paddingHorizontal: space[4], paddingTop: space[3], paddingBottom: space[4], zIndex: 10,
   },
-  low: { paddingTop: space[2], paddingBottom: space[2] },
-  inner: { width: '100%', maxWidth: 680, alignSelf: 'center', gap: space[2] },
-  oneLine: { flexDirection: 'row', alignItems: 'center', gap: space[3] },
+  above: { position: 'absolute', left: 0, right: 0, bottom: '100%', height: 0 },
+  inner: { flexDirection: 'row', flexWrap: 'wrap', width: '100%', maxWidth: 680, alignSelf: 'center', rowGap: space[2], columnGap: space[3] },
+  whole: { width: '100%' },
   head: { flexDirection: 'row', alignItems: 'center', justifyContent: 'space-between', gap: space[3] },
   range: { fontSize: 22, lineHeight: 28 },
-  buttons: { flexDirection: 'row', gap: space[3] },
+  next: { flexGrow: 1, flexShrink: 1, minWidth: 140 },
 });

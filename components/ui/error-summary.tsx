@@ -39,7 +39,9 @@ export function ErrorSummary({ problems, attempt = 1 }: ErrorSummaryProps) {
 }
 
 const styles = StyleSheet.create({
-  box: { borderWidth: border.chosen, borderColor: colors.stop, borderRadius: radius.button, backgroundColor: colors.card, padding: space[4] },
+  box: {
+    padding: space[4], borderWidth: border.chosen, borderColor: colors.stop, borderRadius: radius.button, backgroundColor: colors.card,
+  },
   head: { flexDirection: 'row', gap: space[2], alignItems: 'center', paddingBottom: space[2] },
   line: { minHeight: targetPx, justifyContent: 'center', borderTopWidth: border.hair, borderColor: colors.rule, paddingVertical: space[2] },
 });

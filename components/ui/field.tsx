@@ -30,7 +30,10 @@ export interface FieldProps {
 }
 
 /** A labeled text box. The label never moves into it; hint and error are tied to it for screen readers. */
-export function Field({ id, label, hint, value, onChangeText, onBlur, onSubmit, error, optional = false, multiline = false, readOnly = false, saved = false, secure = false, ...box }: FieldProps) {
+export function Field({
+  id, label, hint, value, onChangeText, onBlur, onSubmit, error,
+  optional = false, multiline = false, readOnly = false, saved = false, secure = false, ...box
+}: FieldProps) {
   const [inside, setInside] = useState(false);
   return (
     <View style={{ gap: space[1] }}>

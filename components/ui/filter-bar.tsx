@@ -47,7 +47,7 @@ export function FilterBar({ label, views, value, onChange, children }: FilterBar
 
 const styles = StyleSheet.create({
   bar: { flexDirection: 'row', flexWrap: 'wrap', alignItems: 'center', justifyContent: 'space-between', gap: space[3] },
-  views: { flexDirection: 'row', flexWrap: 'wrap', gap: space[2] },
+  views: { flexDirection: 'row', flexWrap: 'wrap', gap: space[2], flexShrink: 1, minWidth: 0 },
   chip: { flexDirection: 'row', alignItems: 'center', gap: space[2], minHeight: targetPx, paddingHorizontal: 14, borderRadius: radius.small, borderWidth: border.control, borderColor: colors.edge, backgroundColor: colors.card },
   chosen: { backgroundColor: colors.ink, borderColor: colors.ink },
 });

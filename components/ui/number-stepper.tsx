@@ -37,7 +37,10 @@ export interface NumberStepperProps {
 }
 
 /** A number with its unit between two signs. The number is a text box: "9 6", "9.5" and "9 ft 6 in." are all understood. */
-export function NumberStepper({ id, label, hint, unit, min, max, step, start, value, onChange, onBlur, error, optional = false, decreaseLabel, increaseLabel, spoken, unsure }: NumberStepperProps) {
+export function NumberStepper({
+  id, label, hint, unit, min, max, step, start, value, onChange, onBlur, error,
+  optional = false, decreaseLabel, increaseLabel, spoken, unsure,
+}: NumberStepperProps) {
   // What is being typed; null while the box shows the value.
   const [typed, setTyped] = useState<string | null>(null);
   const unread = typed !== null && typed.trim() !== '' && readNumber(typed, unit) === null;

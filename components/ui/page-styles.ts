@@ -19,8 +19,14 @@ export const pageStyles = [
   `@media (min-width:${breakpoints.tablet}px){[data-part="panel-drawing"][data-part]{height:236px;flex-basis:300px;flex-shrink:0}}`,
   // Under 360 px a tile of the board has no room for its glyph; the name says the same.
   '@media (max-width:359px){[data-part="load-glyph"]{display:none!important}}',
+  // Where a toast stands on wide windows.
+  '[data-part="corner"][data-part]{position:fixed;left:0;right:0;bottom:0;height:0;z-index:30}',
   // A field that gets the focus must not hide under the dock.
   'html:has([data-part="dock"][data-part]){scroll-padding-bottom:240px}',
+  // A low window (a keyboard is up, a phone lies on its side): one line.
+  '@media (max-height:699px){[data-low="hide"]{display:none!important}[data-part="dock"][data-part]{padding-top:8px;padding-bottom:8px}' +
+    '[data-part="dock-inner"][data-part]{flex-wrap:nowrap;align-items:center}[data-part="dock-back"]{order:-1}[data-part="dock-range"][data-part]{width:auto;flex-shrink:1}' +
+    '[data-part="dock-range"] [data-type="figure"][data-type]{font-size:17px;line-height:22px}html:has([data-part="dock"]){scroll-padding-bottom:96px}}',
   // Large text or a low window: the dock becomes part of the page.
   '[data-part="dock"][data-part]{position:sticky;bottom:0}@media (max-height:419px){[data-part="dock"][data-part]{position:static}}',
 ].join('');

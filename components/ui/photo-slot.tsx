@@ -34,7 +34,9 @@ export interface PhotoSlotProps {
 const TAGS = { good: 'good', poor: 'look', refused: 'bad', waiting: 'quiet' } as const;
 
 /** A place for one photo: frame with a ghost, one action, a verdict that never blocks. */
-export function PhotoSlot({ slot, number, title, state, thumbUrl, percent = 0, hint, verdict, wanted = false, onTake, onChoose, onRemove }: PhotoSlotProps) {
+export function PhotoSlot({
+  slot, number, title, state, thumbUrl, percent = 0, hint, verdict, wanted = false, onTake, onChoose, onRemove,
+}: PhotoSlotProps) {
   const empty = state === 'empty' || state === 'refused';
   const name = `photo ${number}, ${title.toLowerCase()}`;
   return (
@@ -68,7 +70,10 @@ export function PhotoSlot({ slot, number, title, state, thumbUrl, percent = 0, h
 }
 
 const styles = StyleSheet.create({
-  slot: { flexGrow: 1, flexBasis: 0, minWidth: 0, gap: space[2], padding: 8, borderRadius: radius.button, backgroundColor: colors.card, borderWidth: border.chosen, borderColor: colors.rule },
+  slot: {
+    flexGrow: 1, flexBasis: 0, minWidth: 0, gap: space[2], padding: space[2], borderRadius: radius.button, backgroundColor: colors.card,
+    borderWidth: border.chosen, borderColor: colors.rule,
+  },
   wanted: { borderColor: colors.copper, backgroundColor: colors.copperWash },
   poor: { borderColor: colors.warn },
   frame: { height: 104, borderRadius: radius.small, overflow: 'hidden', backgroundColor: colors.card },

@@ -2,8 +2,14 @@ import { View } from 'react-native';
 import { colors, radius, space } from '../theme/tokens';
 import { Text } from './text';
 
+interface PlateProps {
+  readonly children: string;
+  readonly number?: number;
+  readonly dark?: boolean;
+}
+
 /** An engraved plate: at most three words in capitals, with the step's number if it has one. `dark`: on spruce. */
-export function Plate({ children, number, dark = false }: { readonly children: string; readonly number?: number; readonly dark?: boolean }) {
+export function Plate({ children, number, dark = false }: PlateProps) {
   return (
     <View style={{ flexDirection: 'row', alignSelf: 'flex-start', alignItems: 'center', gap: space[2], borderRadius: radius.plate, backgroundColor: dark ? colors.paper : colors.spruce, paddingLeft: number === undefined ? 10 : 6, paddingRight: 10 }}>
       {number === undefined ? null : (

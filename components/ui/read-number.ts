@@ -1,6 +1,9 @@
 import { feetInWords, parseFeet } from '../../shared/units';
 
-/** Reads what was typed in a stepper: lengths in feet as people write them, other numbers with or without unit and thousands comma. Null: not a number. */
+/**
+ * Reads what was typed in a stepper: lengths in feet as people write them, other numbers with or without unit and thousands comma.
+ * @returns null when it is not a number
+ */
 export function readNumber(text: string, unit: string): number | null {
   if (unit === 'ft') return parseFeet(text.replace(/\u00a0/g, ' '));
   const match = /^\s*(\d[\d,]*(?:\.\d+)?)\s*[a-z.\s\u00a0]*$/i.exec(text);

@@ -25,7 +25,10 @@ export function RunTimeline({ label, items }: { readonly label: string; readonly
     <View role="list" aria-label={label}>
       {items.map((item, index) => (
         <View key={item.key} role="listitem" aria-current={item.state === 'now' ? 'step' : undefined} style={styles.row}>
-          <Pipe state={item.state} first={index === 0} last={index === items.length - 1} jogs={index === now && index > 0} x={now >= 0 && index >= now && now > 0 ? AFTER : BEFORE} />
+          <Pipe
+            state={item.state} first={index === 0} last={index === items.length - 1} jogs={index === now && index > 0}
+            x={now > 0 && index >= now ? AFTER : BEFORE}
+          />
           <View style={styles.words}>
             <Text variant="subheading">{item.title}</Text>
             {item.note ? <Text variant="note" color={item.tone ?? 'ink2'} weight={item.tone ? 800 : 600}>{item.note}</Text> : null}
@@ -40,13 +43,11 @@ export function RunTimeline({ label, items }: { readonly label: string; readonly
 function Pipe({ state, first, last, jogs, x }: { state: RunState; first: boolean; last: boolean; jogs: boolean; x: number }) {
   const y = jogs ? MARK + 14 : MARK;
   const done = state === 'done';
-  const straight = (top: number, copper: boolean) => (
-    <View style={[styles.straight, { left: x - 5, top, backgroundColor: copper ? colors.live : colors.card, borderColor: copper ? colors.copperDeep : colors.edge }]} />
-  );
+  const straight = [styles.straight, { left: x - 5 }, done && styles.copper];
   return (
     <View aria-hidden style={styles.column}>
-      {last ? null : straight(y, done)}
-      {first || jogs ? null : <View style={[styles.straight, { left: x - 5, top: 0, bottom: undefined, height: y, backgroundColor: done ? colors.live : colors.card, borderColor: done ? colors.copperDeep : colors.edge }]} />}
+      {last ? null : <View style={[straight, { top: y, bottom: 0 }]} />}
+      {first || jogs ? null : <View style={[straight, { top: 0, height: y }]} />}
       <Svg width={64} height={60} style={{ position: 'absolute' }}>
         <G>
           {jogs ? <Conduit d={`M${BEFORE} -2a12 12 0 0 0 12 12a12 12 0 0 1 12 12V${y}`} width={10} /> : null}
@@ -60,6 +61,7 @@ function Pipe({ state, first, last, jogs, x }: { state: RunState; first: boolean
 const styles = StyleSheet.create({
   row: { flexDirection: 'row', minHeight: 64 },
   column: { width: 64 },
-  straight: { position: 'absolute', bottom: 0, width: 10, borderLeftWidth: 1.5, borderRightWidth: 1.5 },
+  straight: { position: 'absolute', width: 10, borderLeftWidth: 1.5, borderRightWidth: 1.5, backgroundColor: colors.card, borderColor: colors.edge },
+  copper: { backgroundColor: colors.live, borderColor: colors.copperDeep },
   words: { flex: 1, paddingTop: 11, paddingBottom: space[3] },
 });

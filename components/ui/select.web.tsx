@@ -13,7 +13,8 @@ export function Select({ id, label, hideLabel = false, hint, choices, value, onC
       <div className="ui-select-frame">
         <select
           id={id} className={`ui-select${size === 'desk' ? ' ui-select-desk' : ''}${error ? ' ui-wrong' : ''}`} value={value ?? ''} aria-label={hideLabel ? label : undefined}
-          aria-invalid={error ? true : undefined} aria-describedby={describedBy(id, hint, error)} onBlur={onBlur} onChange={(event) => onChange(event.currentTarget.value)}
+          aria-invalid={error ? true : undefined} aria-describedby={describedBy(id, hint, error)}
+          onBlur={onBlur} onChange={(event) => onChange(event.currentTarget.value)}
         >
           {value === null ? <option value="" disabled>{placeholder}</option> : null}
           {choices.map((choice) => <option key={choice.value} value={choice.value}>{choice.label}</option>)}

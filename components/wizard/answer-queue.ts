@@ -18,6 +18,9 @@ interface Options {
   readonly retryAfterMs?: readonly number[];
 }
 
+const without = <T,>(map: Readonly<Record<string, T>>, ids: readonly string[]) =>
+  Object.fromEntries(Object.entries(map).filter(([id]) => !ids.includes(id)));
+
 export interface AnswerQueue {
   /** The intake is there: from now on answers are sent; those given before wait for this. */
   readonly open: () => void;
@@ -57,7 +60,6 @@ export function createAnswerQueue({ send, retryAfterMs = RETRY_MS }: Options): A
     snapshot = { save, unsaved: { ...sending, ...waiting, ...held }, refused };
     listeners.forEach((listener) => listener());
   };
-  const without = <T,>(map: Readonly<Record<string, T>>, ids: readonly string[]) => Object.fromEntries(Object.entries(map).filter(([id]) => !ids.includes(id)));
   const forget = (id: string) => {
     held = without(held, [id]);
     refused = without(refused, [id]);

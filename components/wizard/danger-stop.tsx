@@ -12,7 +12,8 @@ import { useWizard } from './wizard-context';
 const DANGERS = ['rust_or_water', 'warm', 'buzzing', 'scorch'];
 
 /** True when what was seen or heard at the panel is a reason to leave it alone. */
-export const isDanger = (condition: unknown): boolean => Array.isArray(condition) && condition.some((entry) => DANGERS.includes(String(entry)));
+export const isDanger = (condition: unknown): boolean =>
+  Array.isArray(condition) && condition.some((entry) => DANGERS.includes(String(entry)));
 
 /** The stop box that appears when a danger is picked: whom to call, and a way out. The person may still go on. */
 export function DangerStop() {

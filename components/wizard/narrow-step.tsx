@@ -15,7 +15,6 @@ import { PartPicker } from './part-picker';
 import { PlanPane } from './plan-pane';
 import { RangeDock } from './range-dock';
 import { runOfSteps } from './run-of-steps';
-import { SaveNote } from './save-note';
 import type { StepState } from './use-step';
 import { WhyNote } from './why-note';
 import { useWizard } from './wizard-context';
@@ -46,16 +45,20 @@ export function NarrowStep({ state }: { state: StepState }) {
         {groups.some((entry) => entry.drawing === 'plan') ? <PartPicker step={step} group={group} groups={groups} /> : null}
         <View style={{ gap: space[1] }}>
           <Text variant={drawn ? 'heading' : 'title'} level={1}>{group.title}</Text>
-          {hint && !planFirst ? hint : null}
+          {planFirst ? null : hint}
         </View>
-        {planFirst ? <><PlanPane />{hint}</> : null}
+        {planFirst && phone ? <><PlanPane />{hint}</> : null}
         <GroupIntro group={group} />
-        <GroupFields group={group} state={state} />
-        {drawn && !planFirst ? <PlanPane /> : null}
+        {drawn && !phone ? (
+          <View style={{ flexDirection: 'row', gap: space[5] }}>
+            <View style={{ flex: 1 }}><PlanPane /></View>
+            <View style={{ width: 260, gap: space[4] }}>{planFirst ? hint : null}<GroupFields group={group} state={state} compact /></View>
+          </View>
+        ) : <GroupFields group={group} state={state} />}
+        {drawn && phone && !planFirst ? <PlanPane /> : null}
         <GroupExtras group={group} />
         {group.why ? <WhyNote words={group.why} /> : null}
         {state.obstacle ? <FieldError id="next">{state.obstacle}</FieldError> : null}
-        <SaveNote />
       </View>
     </Page>
   );

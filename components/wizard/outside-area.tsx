@@ -34,7 +34,10 @@ export function OutsideArea({ zip }: { zip: string }) {
         <Text weight={700} color="ok" role="status">Kept. We write to {email.trim()} once, when we work in {zip}.</Text>
       ) : (
         <>
-          <Field id="area-email" label="E-mail" hint="For this one message, nothing else." value={email} onChangeText={change} inputMode="email" autoComplete="email" error={wrong} onSubmit={send} />
+          <Field
+            id="area-email" label="E-mail" hint="For this one message, nothing else." inputMode="email" autoComplete="email"
+            value={email} onChangeText={change} error={wrong} onSubmit={send}
+          />
           {ask.error && !wrong ? <FieldError id="area">{failureWords(ask.error)}</FieldError> : null}
           <Button label="Tell me if you come here" kind="quiet" busy={ask.isPending} busyLabel="Sending" onPress={send} />
         </>

@@ -8,8 +8,9 @@ import type { StepState } from './use-step';
 /** The square way back. A link, so that nothing is lost and it works like any other. */
 export const BackLink = ({ state }: { state: StepState }) => <ButtonLink kind="back" icon={ArrowLeft} label={state.back.label} href={state.back.href} />;
 
-export function NextButton({ state, grow = true }: { state: StepState; grow?: boolean }) {
-  return <Button label={state.next.label} arrow busy={state.busy} busyLabel="Saving" onPress={state.goOn} grow={grow} />;
+/** `short`: "Next" alone, where it shares its line with the range. */
+export function NextButton({ state, grow = true, short = false }: { state: StepState; grow?: boolean; short?: boolean }) {
+  return <Button label={short ? 'Next' : state.next.label} spokenLabel={short ? `Next. ${state.next.label}` : state.next.label} arrow busy={state.busy} busyLabel="Saving" onPress={state.goOn} grow={grow} />;
 }
 
 /** Back and Next in words, at the foot of a wide step. */

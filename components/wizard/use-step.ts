@@ -1,6 +1,7 @@
 import { useRouter } from 'expo-router';
 import { useState } from 'react';
 import { stepProblems, visibleFields, visibleGroups, type Answers, type Group, type Step } from '../../shared/wizard/index';
+import { afterPress } from '../ui/after-press';
 import { fullBoard } from './full-board';
 import { backTurn, groupOfField, nextTurn, placeHref, problemsOnNext, type Turn } from './step-flow';
 import { useWizard } from './wizard-context';
@@ -83,7 +84,7 @@ export function useStep(step: Step, group: Group | null, byGroup: boolean): Step
     refusals: tried.place === place ? tried.count : 0,
     errorOf: (id) => wizard.refused[id] ?? problems.find((problem) => problem.field === id)?.detail ?? live.find((problem) => problem.field === id)?.detail ?? null,
     leaveField: (id) => {
-      if (!left.has(id)) setLeft(new Set([...left, id]));
+      afterPress(() => setLeft((before) => (before.has(id) ? before : new Set([...before, id]))));
       void wizard.flush();
     },
     goOn: () => void goOn(),

@@ -10,7 +10,7 @@ import { RunRail } from '../ui/run-rail';
 import { Text } from '../ui/text';
 import { FinishLater } from './finish-later';
 import { runOfSteps } from './run-of-steps';
-import { SaveNote } from './save-note';
+import { SaveToast } from './save-toast';
 import type { StepState } from './use-step';
 import { useWizard } from './wizard-context';
 
@@ -42,10 +42,10 @@ export function WideFrame({ state, title, hint, focusKey, children, side }: Prop
           <ErrorSummary problems={state.problems} attempt={state.refusals} />
           {children}
           {state.obstacle ? <FieldError id="next">{state.obstacle}</FieldError> : null}
-          <SaveNote />
         </View>
         <View style={styles.side}>{side}</View>
       </View>
+      <View dataSet={{ part: 'corner' }}><SaveToast /></View>
     </Page>
   );
 }

@@ -17,7 +17,8 @@ export interface SignedIn {
 /** Starts a session of a person and ends the one that this browser held before. @returns the cookie's token */
 export async function startSession(models: Models, staffId: string, heldToken: string | null, now: Date): Promise<string> {
   const token = newToken();
-  await models.DeskSession.create({ tokenHash: hashOf(token), staffId, createdAt: now, lastSeenAt: now, expiresAt: new Date(now.getTime() + LIFE_MS) });
+  const expiresAt = new Date(now.getTime() + LIFE_MS);
+  await models.DeskSession.create({ tokenHash: hashOf(token), staffId, createdAt: now, lastSeenAt: now, expiresAt });
   if (heldToken !== null) await models.DeskSession.update({ revokedAt: now }, { where: { tokenHash: hashOf(heldToken), revokedAt: null } });
   return token;
 }
@@ -29,7 +30,8 @@ export async function findSession(models: Models, token: string, now: Date): Pro
   const staff = await models.Staff.findOne({ where: { id: session.staffId, active: true } });
   if (!staff) return null;
   if (now.getTime() - session.lastSeenAt.getTime() > SEEN_EVERY_MS) await session.update({ lastSeenAt: now });
-  return { sessionId: session.id, staff: { id: staff.id, name: staff.name, email: staff.email, role: staff.role }, csrfToken: csrfTokenOf(token) };
+  const { id, name, email, role } = staff;
+  return { sessionId: session.id, staff: { id, name, email, role }, csrfToken: csrfTokenOf(token) };
 }
 
 export async function endSession(models: Models, sessionId: string, now: Date): Promise<void> {

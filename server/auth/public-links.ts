@@ -12,10 +12,12 @@ export const linkLifeMs = (purpose: LinkPurpose): number => lifeDays[purpose] * 
 export interface NewLink { readonly token: string; readonly expiresAt: Date }
 
 /** Makes a cookie's or a mailed link's token for an intake; only its hash is stored. */
-export async function makeLink(models: Models, purpose: LinkPurpose, intakeId: string, now: Date, transaction?: Transaction): Promise<NewLink> {
+export async function makeLink(
+  models: Models, purpose: LinkPurpose, intakeId: string, now: Date, transaction: Transaction | null = null,
+): Promise<NewLink> {
   const token = newToken();
   const expiresAt = new Date(now.getTime() + linkLifeMs(purpose));
-  await models.Link.create({ tokenHash: hashOf(token), purpose, intakeId, expiresAt, createdAt: now }, { transaction: transaction ?? null });
+  await models.Link.create({ tokenHash: hashOf(token), purpose, intakeId, expiresAt, createdAt: now }, { transaction });
   return { token, expiresAt };
 }
 

@@ -5,9 +5,14 @@ import { settleDeposit, type Settled } from './settle-deposit';
 
 export type Handled = Settled | 'seen' | 'refunded' | 'ignored';
 
-type SessionEvent = Stripe.CheckoutSessionCompletedEvent | Stripe.CheckoutSessionAsyncPaymentSucceededEvent | Stripe.CheckoutSessionExpiredEvent;
+type SessionEvent =
+  | Stripe.CheckoutSessionCompletedEvent
+  | Stripe.CheckoutSessionAsyncPaymentSucceededEvent
+  | Stripe.CheckoutSessionExpiredEvent;
 
-const sessionEvents: ReadonlySet<string> = new Set(['checkout.session.completed', 'checkout.session.async_payment_succeeded', 'checkout.session.expired']);
+const sessionEvents: ReadonlySet<string> = new Set([
+  'checkout.session.completed', 'checkout.session.async_payment_succeeded', 'checkout.session.expired',
+]);
 const tellsOfSession = (event: Stripe.Event): event is SessionEvent => sessionEvents.has(event.type);
 
 /**

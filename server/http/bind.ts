@@ -65,11 +65,12 @@ function readParams(endpoint: Endpoint, request: Request): unknown {
 const whoOf = ({ intakeId, homeownerIntakeId, session }: Caller): string => session?.staff.id ?? intakeId ?? homeownerIntakeId ?? 'public';
 
 /**
- * Binds a handler to a declared endpoint: refuses other sites, counts tries, lets in only who may, reads and validates every part, does what is
- * marked idempotent once, and sends what the handler gives. In tests the answer is held against its declaration too.
+ * Binds a handler to a declared endpoint: refuses other sites, counts tries, lets in only who may, reads and validates every part,
+ * does what is marked idempotent once, and sends what the handler gives. In tests the answer is held against its declaration too.
  */
 export function bind<P extends Part, Q extends Part, B extends Part, R extends Part>(
-  { router, deps, bound }: Api, endpoint: Endpoint<P, Q, B, R>, handle: (call: Call<Read<P>, Read<Q>, Read<B>>) => Promise<Given<R>>, options: BindOptions = {},
+  { router, deps, bound }: Api, endpoint: Endpoint<P, Q, B, R>,
+  handle: (call: Call<Read<P>, Read<Q>, Read<B>>) => Promise<Given<R>>, options: BindOptions = {},
 ): void {
   const { method, path, bodyType, idempotent, status } = endpoint;
   bound.push(endpoint);

@@ -24,7 +24,9 @@ export const problemOf = (kind: ProblemKind, more: Pick<Problem, 'detail' | 'err
  * Makes the refusal to throw. `detail`: words for people on what to do now; `errors`: what is wrong, each with a JSON Pointer (RFC 6901)
  * into the body; `headers`: such as Retry-After.
  */
-export const problem = (kind: ProblemKind, detail?: string, errors?: ProblemError[], headers: Readonly<Record<string, string>> = {}): Refusal =>
+export const problem = (
+  kind: ProblemKind, detail?: string, errors?: ProblemError[], headers: Readonly<Record<string, string>> = {},
+): Refusal =>
   new Refusal(problemOf(kind, { detail, errors }), headers);
 
 /** Sends a problem document, RFC 9457. */

@@ -4,7 +4,10 @@ import { pointerOf, problem } from './problem';
 const MAX_DEPTH = 12;
 const unstorableSign = /[\u0000\ud800-\udfff]/u;
 
-/** Finds text that PostgreSQL cannot store (a zero character, half of a pair) and nesting beyond reason. Without recursion, so that depth cannot hurt. */
+/**
+ * Finds text that PostgreSQL cannot store (a zero character, half of a pair) and nesting beyond reason.
+ * Without recursion, so that depth cannot hurt.
+ */
 function unstorable(value: unknown): (string | number)[] | null {
   const open: { value: unknown; path: (string | number)[] }[] = [{ value, path: [] }];
   for (let entry = open.pop(); entry !== undefined; entry = open.pop()) {

@@ -1,3 +1,4 @@
+import type { Response } from 'express';
 import * as endpoints from '../../shared/api/intakes';
 import { linkLifeMs, revokeLink } from '../auth/public-links';
 import type { Deps } from '../deps';
@@ -8,9 +9,9 @@ import { readIntake } from './read-intake';
 import { resumeIntake } from './resume-intake';
 import { saveAnswers } from './save-answers';
 import { startIntake } from './start-intake';
-import type { Response } from 'express';
 
-const holdIntake = ({ env }: Deps, response: Response, token: string): void => setCookie(response, 'intake', token, env.https, linkLifeMs('intake-cookie'));
+const holdIntake = ({ env }: Deps, response: Response, token: string): void =>
+  setCookie(response, 'intake', token, env.https, linkLifeMs('intake-cookie'));
 
 export function intakeRoutes(api: Api): void {
   const { deps } = api;

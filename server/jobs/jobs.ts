@@ -22,6 +22,9 @@ const RETRIES = (24 * 60 * 60) / RETRY_EVERY_S;
 /** A task whose process died is taken up again after this. */
 const EXPIRES_AFTER_S = 60;
 
+/** Any number of our own: who holds it makes the queues. */
+const START_LOCK = 7_341_003;
+
 /** The job's id follows from the task's key, so that a task handed on twice is one job. */
 function jobId(dedupeKey: string): string {
   const hex = createHash('sha256').update(dedupeKey).digest('hex');
@@ -63,12 +66,16 @@ export function createJobs(databaseUrl: string, db: Db, logger: Logger): Jobs {
   return {
     nudge,
     async start(handlers) {
-      await boss.start();
-      for (const kind of taskKinds) {
-        await boss.createQueue(kind, {
-          name: kind, retryLimit: RETRIES, retryDelay: RETRY_EVERY_S, retryBackoff: false, expireInSeconds: EXPIRES_AFTER_S,
-        });
-      }
+      // Two processes that make the same tables at once would deadlock: the second waits and finds them made.
+      await db.sequelize.transaction(async (transaction) => {
+        await db.sequelize.query('SELECT pg_advisory_xact_lock($lock)', { transaction, bind: { lock: START_LOCK } });
+        await boss.start();
+        for (const kind of taskKinds) {
+          await boss.createQueue(kind, {
+            name: kind, retryLimit: RETRIES, retryDelay: RETRY_EVERY_S, retryBackoff: false, expireInSeconds: EXPIRES_AFTER_S,
+          });
+        }
+      });
       await work('send-mail', handlers['send-mail']);
       await work('refund-deposit', handlers['refund-deposit']);
       timer = setInterval(nudge, OUTBOX_EVERY_MS);

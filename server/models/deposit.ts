@@ -26,5 +26,6 @@ export type Deposit = Row<DepositColumns, Given>;
 export const defineDeposit = (sequelize: Sequelize) => table<DepositColumns, Given>(sequelize, 'deposits', {
   id: column.id, intakeId: column.uuid, quoteId: column.uuid, optionId: column.text, amountCents: column.integer,
   currency: { ...column.text, defaultValue: 'usd' }, state: { ...column.text, defaultValue: 'pending' }, checkoutSessionId: column.text,
-  paymentIntentId: column.text, contact: column.json, consentWords: column.text, createdAt: column.now, paidAt: column.time, refundedAt: column.time,
+  paymentIntentId: column.text, contact: column.json, consentWords: column.text,
+  createdAt: column.now, paidAt: column.time, refundedAt: column.time,
 });

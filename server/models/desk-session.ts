@@ -16,5 +16,6 @@ export type DeskSession = Row<DeskSessionColumns, Given>;
 
 /** Sign-ins at the desk. */
 export const defineDeskSession = (sequelize: Sequelize) => table<DeskSessionColumns, Given>(sequelize, 'desk_sessions', {
-  id: column.id, tokenHash: column.bytes, staffId: column.uuid, createdAt: column.now, lastSeenAt: column.now, expiresAt: column.time, revokedAt: column.time,
+  id: column.id, tokenHash: column.bytes, staffId: column.uuid, createdAt: column.now, lastSeenAt: column.now,
+  expiresAt: column.time, revokedAt: column.time,
 });

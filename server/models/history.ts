@@ -19,6 +19,7 @@ export type History = Row<HistoryColumns, Given>;
 
 /** What happened, when and by whom. The database refuses any change or removal. */
 export const defineHistory = (sequelize: Sequelize) => table<HistoryColumns, Given>(sequelize, 'history', {
-  id: { type: DataTypes.BIGINT, primaryKey: true, autoIncrement: true }, leadId: column.uuid, intakeId: column.uuid, at: column.now, staffId: column.uuid,
+  id: { type: DataTypes.BIGINT, primaryKey: true, autoIncrement: true },
+  leadId: column.uuid, intakeId: column.uuid, at: column.now, staffId: column.uuid,
   who: column.text, what: column.text, before: column.text, after: column.text,
 });

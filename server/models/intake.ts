@@ -23,6 +23,6 @@ export type Intake = Row<IntakeColumns, Given>;
 
 /** A homeowner's answers. The column `zip` is generated from them by the database. */
 export const defineIntake = (sequelize: Sequelize) => table<IntakeColumns, Given>(sequelize, 'intakes', {
-  id: column.id, version: { ...column.integer, defaultValue: 1 }, answers: { ...column.json, defaultValue: {} }, jurisdictionId: column.text,
-  stage: { ...column.text, defaultValue: 'open' }, email: column.text, currentStep: column.text, createdAt: column.now, updatedAt: column.now,
+  id: column.id, version: { ...column.integer, defaultValue: 1 }, answers: { ...column.json, defaultValue: {} },
+  jurisdictionId: column.text, stage: { ...column.text, defaultValue: 'open' }, email: column.text, currentStep: column.text, createdAt: column.now, updatedAt: column.now,
 });

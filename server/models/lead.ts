@@ -45,8 +45,11 @@ export type Lead = Row<LeadColumns, Given>;
  */
 export const defineLead = (sequelize: Sequelize) => table<LeadColumns, Given>(sequelize, 'leads', {
   id: column.id, jobNumber: { ...column.integer, defaultValue: sequelize.literal(`nextval('lead_job_numbers')`) }, intakeId: column.uuid, quoteId: column.uuid,
-  optionId: column.text, depositId: column.uuid, name: column.text, email: column.text, phone: column.text, street: column.text, town: column.text,
-  work: column.text, workNote: column.text, contactWays: column.texts, consentAt: column.time, consentWords: column.text, stage: column.text,
-  version: { ...column.integer, defaultValue: 1 }, dueAt: column.time, assigneeId: column.uuid, lowCents: column.integer, highCents: column.integer,
+  optionId: column.text, depositId: column.uuid, name: column.text, email: column.text,
+  phone: column.text, street: column.text, town: column.text,
+  work: column.text, workNote: column.text, contactWays: column.texts, consentAt: column.time, consentWords: column.text,
+  stage: column.text,
+  version: { ...column.integer, defaultValue: 1 }, dueAt: column.time, assigneeId: column.uuid,
+  lowCents: column.integer, highCents: column.integer,
   firmCents: column.integer, createdAt: column.now, updatedAt: column.now,
 });

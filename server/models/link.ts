@@ -19,5 +19,6 @@ export type Link = Row<LinkColumns, Given>;
 
 /** Cookies and mailed links of the public. */
 export const defineLink = (sequelize: Sequelize) => table<LinkColumns, Given>(sequelize, 'links', {
-  id: column.id, tokenHash: column.bytes, purpose: column.text, intakeId: column.uuid, expiresAt: column.time, revokedAt: column.time, createdAt: column.now,
+  id: column.id, tokenHash: column.bytes, purpose: column.text, intakeId: column.uuid,
+  expiresAt: column.time, revokedAt: column.time, createdAt: column.now,
 });

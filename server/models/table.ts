@@ -10,8 +10,10 @@ export function table<Columns extends object, Given extends keyof Columns>(
   sequelize: Sequelize, name: string, columns: Declared<Columns, Given>,
 ): ModelStatic<Row<Columns, Given>> {
   // Sequelize writes each column's name into its declaration, so every column needs one of its own.
-  const own = Object.fromEntries(Object.entries(columns).map(([id, declared]) => [id, { ...(declared as object) }])) as Declared<Columns, Given>;
-  return sequelize.define<Row<Columns, Given>>(name, own, { tableName: name, underscored: true, timestamps: false });
+  const own = Object.entries(columns).map(([id, declared]) => [id, { ...(declared as object) }]);
+  return sequelize.define<Row<Columns, Given>>(name, Object.fromEntries(own) as Declared<Columns, Given>, {
+    tableName: name, underscored: true, timestamps: false,
+  });
 }
 
 /** Kinds of columns. */

@@ -64,7 +64,10 @@ function operation(id: string, endpoint: Endpoint): Json {
     ...(endpoint.idempotent ? [{ name: 'Idempotency-Key', in: 'header', required: true, schema: { type: 'string', minLength: 8, maxLength: 200 } }] : []),
   ];
   const body = requestBody(endpoint);
-  const refused = Object.fromEntries(refusals(endpoint).map((kind) => [String(problemKinds[kind].status), { description: problemKinds[kind].title, content: problemContent }]));
+  const refused = Object.fromEntries(refusals(endpoint).map((kind) => {
+    const { status, title } = problemKinds[kind];
+    return [String(status), { description: title, content: problemContent }];
+  }));
   return {
     operationId: id, summary: endpoint.summary, security: security(endpoint),
     ...(parameters.length > 0 ? { parameters } : {}),

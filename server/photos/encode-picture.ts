@@ -54,7 +54,8 @@ async function encode(bytes: Buffer): Promise<EncodedPicture> {
 }
 
 /**
- * Makes what we keep of an uploaded file: an upright JPEG without metadata and a small one. What came in is never kept. Runs off the event loop.
+ * Makes what we keep of an uploaded file: an upright JPEG without metadata and a small one. What came in is never kept.
+ * Runs off the event loop.
  * @throws problems unsupported-media (not a picture, damaged, a kind we cannot read), too-large (too many pixels)
  */
 export async function encodePicture(bytes: Buffer): Promise<EncodedPicture> {

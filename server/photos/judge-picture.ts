@@ -15,7 +15,8 @@ export function measure(pixels: Uint8Array, width: number, height: number): { me
   for (let y = 1; y < height - 1; y += 1) {
     for (let x = 1; x < width - 1; x += 1) {
       const at = y * width + x;
-      const laplacian = 4 * (pixels[at] ?? 0) - (pixels[at - 1] ?? 0) - (pixels[at + 1] ?? 0) - (pixels[at - width] ?? 0) - (pixels[at + width] ?? 0);
+      const around = (pixels[at - 1] ?? 0) + (pixels[at + 1] ?? 0) + (pixels[at - width] ?? 0) + (pixels[at + width] ?? 0);
+      const laplacian = 4 * (pixels[at] ?? 0) - around;
       edges += laplacian;
       squares += laplacian * laplacian;
       count += 1;
@@ -27,7 +28,8 @@ export function measure(pixels: Uint8Array, width: number, height: number): { me
 
 /** Says whether another try is worth it. `picture` is upright; the sizes are those of the picture as it came. */
 export async function judgePicture(picture: Buffer, widthPx: number, heightPx: number): Promise<Photo['verdict']> {
-  const { data, info } = await sharp(picture).resize({ width: JUDGED_WIDTH_PX, withoutEnlargement: true }).grayscale().raw().toBuffer({ resolveWithObject: true });
+  const gray = sharp(picture).resize({ width: JUDGED_WIDTH_PX, withoutEnlargement: true }).grayscale();
+  const { data, info } = await gray.raw().toBuffer({ resolveWithObject: true });
   const { mean, sharpness } = measure(data, info.width, info.height);
   if (mean < DARK_BELOW) return 'dark';
   if (Math.min(widthPx, heightPx) < SMALL_BELOW_PX) return 'small';

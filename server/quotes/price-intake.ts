@@ -25,7 +25,8 @@ function priceNow({ pricing, clock }: Deps, answers: Answers) {
   return { document, inputHash: hashOf({ facts, edition: edition.number, pricedOn }) };
 }
 
-const isHeld = ({ clock }: Deps, { document }: StoredQuote): boolean => document.heldUntil >= isoDateIn(clock(), document.jurisdiction.timeZone);
+const isHeld = ({ clock }: Deps, { document }: StoredQuote): boolean =>
+  document.heldUntil >= isoDateIn(clock(), document.jurisdiction.timeZone);
 
 /** The price to show again: paid for, or standing and still held. */
 async function standing(deps: Deps, intake: Pick<Intake, 'id' | 'stage'>): Promise<StoredQuote | null> {
@@ -46,7 +47,8 @@ async function freeze(deps: Deps, intake: Intake, priced: ReturnType<typeof pric
     await models.Quote.update({ withdrawnAt: clock() }, { where: { intakeId: intake.id, withdrawnAt: null }, transaction });
     const quote = await models.Quote.create({
       intakeId: intake.id, intakeVersion: intake.version, inputHash, document: JSON.stringify(document), outcome: document.outcome,
-      rulebookEdition: document.rulebookEdition, lowCents: recommended?.lowCents ?? null, highCents: recommended?.highCents ?? null, createdAt: clock(),
+      rulebookEdition: document.rulebookEdition, createdAt: clock(),
+      lowCents: recommended?.lowCents ?? null, highCents: recommended?.highCents ?? null,
     }, { transaction });
     if (now.stage === 'open' || now.stage === 'priced') await now.update({ stage: 'priced' }, { transaction });
     return quote.id;

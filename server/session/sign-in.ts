@@ -9,7 +9,9 @@ import { countTry, forgetTries } from '../http/rate-limits';
  * @returns the token of the new cookie
  * @throws problems unauthenticated (the same words whatever was wrong), too-many
  */
-export async function signIn({ sequelize, models, clock, env }: Deps, given: { readonly email: string; readonly password: string }, heldToken: string | null): Promise<string> {
+export async function signIn(
+  { sequelize, models, clock, env }: Deps, given: { readonly email: string; readonly password: string }, heldToken: string | null,
+): Promise<string> {
   const email = given.email.trim().toLowerCase();
   await countTry(sequelize, 'sign-in-account', email, env.RATE_LIMIT_FACTOR);
   const staff = await models.Staff.findOne({ where: { email } });

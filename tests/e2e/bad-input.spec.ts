@@ -90,7 +90,7 @@ test('rust at the panel: the caution comes first, no price is given, a visit is 
   await page.getByRole('textbox', { name: 'Your name' }).fill('Corin Vale');
   await page.getByRole('textbox', { name: 'E-mail' }).fill(email);
   await page.getByRole('textbox', { name: 'House number and street' }).fill('3 Demo Row');
-  await page.getByRole('checkbox', { name: /You may use my details and photos/ }).check({ force: true });
+  await page.getByRole('checkbox', { name: /You may use my details and photos/ }).check();
   await page.getByRole('button', { name: 'Ask for a visit' }).click();
   await wizard.see('Thank you. We have it.');
   await expectAccessible(page);
@@ -173,7 +173,7 @@ test('a step can be done with the keyboard alone', async ({ page }) => {
   await page.keyboard.press('ArrowUp');
   await focusOn(/yearBuilt/);
   await page.keyboard.press('Space');
-  await focusOn(/living space/);
+  await focusOn(/^How big is the living space\? floorAreaFt2/);
   await page.keyboard.press('ArrowUp');
   await expect(page.getByRole('spinbutton', { name: 'How big is the living space?' })).toHaveValue(/^1,?800/);
   await focusOn(/^Next: car/);

@@ -17,6 +17,7 @@ export default defineConfig({
   use: {
     // Set by the global set-up, which has run by the time a worker reads this.
     baseURL: process.env.E2E_SITE_URL,
+    actionTimeout: 15_000,
     locale: 'en-US',
     timezoneId: 'America/Chicago',
     screenshot: 'only-on-failure',

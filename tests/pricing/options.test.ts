@@ -124,7 +124,8 @@ describe('the panel', () => {
     const more = { ...small, loads: { ...electric, spa: { present: true, amount: null } } };
     // A spa of 9,600 VA adds 0.4 * 9,600 / 240 = 16 A: 110.9 A for the home alone.
     expect(find(optionsOf(more), 'wired-48').panelChange).toBe('service_upgrade');
-    expect(find(optionsOf(more), 'wired-48').load.status).toBe('red');
+    // The sheet is that of the job: the home of 110.9 A and 48 A on the new 200 A service.
+    expect(find(optionsOf(more), 'wired-48').load).toMatchObject({ status: 'green', serviceAmps: 200, homeAmps: 110.9, chargerAmps: 48 });
   });
 });
 

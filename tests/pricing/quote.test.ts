@@ -51,12 +51,12 @@ describe('a quote document', () => {
     );
   });
 
-  it('has options for any home that nothing flags and a wire can reach', () => {
+  it('has options for any home that nothing flags, a wire can reach and a service can carry', () => {
     fc.assert(
       fc.property(plainFacts, (facts) => {
         const document = price(facts, 12);
         expectSound(document);
-        expect(document.flags.map((flag) => flag.id).filter((id) => id !== 'no_way')).toEqual([]);
+        expect(document.flags.map((flag) => flag.id).filter((id) => id !== 'no_way' && id !== 'beyond_service')).toEqual([]);
       }),
       { numRuns: 100 },
     );
@@ -224,6 +224,6 @@ describe('the live range', () => {
     expect(liveRange({ facts: barelyKnown(), edition: editionOne, samples: 20 }).plan).toBeNull();
     const half = liveRange({ facts: exampleFacts({ panelAt: null }), edition: editionOne, samples: 20 }).plan;
     expect([half?.panel, half?.run]).toEqual([null, null]);
-    expect(liveRange({ facts: exampleFacts(), edition: editionOne }).plan?.run?.lengthFt).toBe(31.75);
+    expect(liveRange({ facts: exampleFacts(), edition: editionOne }).plan?.run?.lengthFt).toBe(32);
   });
 });

@@ -4,10 +4,11 @@ import { join } from 'node:path';
 import type { Intake } from '../../shared/api/intakes';
 import { completeAnswers } from '../support/answers';
 import { useTestDatabase } from '../support/database';
-import { runServer, startServer, type ServerProcess } from '../support/server-process';
+import { endLeftServers, runServer, startServer, type ServerProcess } from '../support/server-process';
 
 const database = useTestDatabase();
 const folder = mkdtempSync(join(tmpdir(), 'tidyrun-main-'));
+afterEach(endLeftServers);
 afterAll(() => rmSync(folder, { recursive: true, force: true }));
 
 const env = () => ({ DATABASE_URL: database.url, SMTP_URL: 'smtp://127.0.0.1:1', MAIL_FROM: 'quotes@example.com', STORAGE_DIR: folder, PUBLIC_URL: 'http://127.0.0.1:4173' });

@@ -55,7 +55,9 @@ export const browserOf = (app: Express): Agent => request.agent(app).set('Sec-Fe
  * The whole API on a database of its own, without a payment provider and without mail unless given.
  * @param changes laid over the dependencies; `env`: over the configuration
  */
-export async function startTestApp(changes: Partial<Deps> = {}, env: Readonly<Record<string, string>> = {}): Promise<TestApp & { databaseUrl: string }> {
+export async function startTestApp(
+  changes: Partial<Deps> = {}, env: Readonly<Record<string, string>> = {},
+): Promise<TestApp & { databaseUrl: string }> {
   const database = await createTestDatabase();
   const folder = mkdtempSync(join(tmpdir(), 'tidyrun-storage-'));
   const sequelize = connect(database.url, 5);

@@ -20,7 +20,8 @@ export interface StoreOptions { readonly intakeId?: string; readonly pricedOn?: 
 
 /** An intake whose price is frozen, stored as the API stores it: a home of which all is known but the panel's blank spaces. */
 export async function storePricedIntake({ models }: Db, { intakeId, pricedOn }: StoreOptions = {}): Promise<PricedIntake> {
-  const document = priceIntake({ facts: { ...knownHome(), blankSpaces: null }, edition: editionOne, pricedOn: pricedOn ?? new Date().toISOString().slice(0, 10), samples: 50 });
+  const day = pricedOn ?? new Date().toISOString().slice(0, 10);
+  const document = priceIntake({ facts: { ...knownHome(), blankSpaces: null }, edition: editionOne, pricedOn: day, samples: 50 });
   const option = document.options.find(({ recommended }) => recommended);
   if (!option) throw new Error('A known home has a recommended option');
   const columns = { answers: { zip: '00017' }, jurisdictionId: document.jurisdiction.id, stage: 'priced' } as const;

@@ -10,11 +10,20 @@ export interface ServerProcess {
   readonly end: (signal?: 'SIGTERM' | 'SIGKILL') => Promise<number | string | null>;
 }
 
+const running = new Set<ChildProcess>();
+
+/** Ends what a test that failed has left behind. */
+export function endLeftServers(): void {
+  for (const child of running) child.kill('SIGKILL');
+}
+
 const ended = (child: ChildProcess) => new Promise<number | string | null>((resolve) => { child.once('exit', (code, signal) => resolve(code ?? signal)); });
 
 function spawnServer(env: Readonly<Record<string, string>>): { child: ChildProcess; output: () => string } {
   const { PATH, HOME } = process.env;
   const child = spawn(process.execPath, ['--import', 'tsx', 'server/main.ts'], { cwd: root, env: { PATH, HOME, NODE_ENV: 'production', ...env }, stdio: ['ignore', 'pipe', 'pipe'] });
+  running.add(child);
+  child.once('exit', () => running.delete(child));
   let output = '';
   for (const stream of [child.stdout, child.stderr]) stream?.on('data', (chunk: Buffer) => { output += chunk.toString(); });
   return { child, output: () => output };

@@ -10,7 +10,10 @@ import { useWizard } from '../wizard-context';
 const kinds: readonly LoadKind[] = loadKinds;
 const TYPING_MS = 400;
 /** Steps and starting points of the amounts: common sizes, common practice, no source. */
-const AMOUNTS = { tons: { step: 0.5, start: 3 }, kilowatts: { step: 1, start: 10 }, count: { step: 1, start: 4 }, amps: { step: 1, start: 32 }, none: { step: 1, start: 1 } } as const;
+const AMOUNTS = {
+  tons: { step: 0.5, start: 3 }, kilowatts: { step: 1, start: 10 }, count: { step: 1, start: 4 }, amps: { step: 1, start: 32 },
+  none: { step: 1, start: 1 },
+} as const;
 
 /** The board of big loads, and under it the sizes of those that are there and have one. */
 export function LoadsInput({ label }: { label: string }) {

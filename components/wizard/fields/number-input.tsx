@@ -16,13 +16,14 @@ export function NumberInput({ field, error, onLeave }: FieldInputProps<NumberFie
     else if (field.schema.safeParse(number).success) answer(field.id, number, TYPING_MS);
     else hold(field.id, number);
   };
+  const { id, label, unit, min, max, step, start, unsure } = field;
   return (
     <NumberStepper
-      id={field.id} label={field.label} unit={field.unit} min={field.min} max={field.max} step={field.step} start={field.start} error={error}
+      id={id} label={label} unit={unit} min={min} max={max} step={step} start={start} error={error}
       {...(field.hint ? { hint: field.hint } : {})}
       {...(field.optional ? { optional: true } : {})}
-      {...(field.unsure
-        ? { unsure: { label: field.unsure.label, note: field.unsure.note, picked: value === UNSURE, onPick: (picked: boolean) => answer(field.id, picked ? UNSURE : null) } }
+      {...(unsure
+        ? { unsure: { label: unsure.label, note: unsure.note, picked: value === UNSURE, onPick: (picked: boolean) => answer(id, picked ? UNSURE : null) } }
         : {})}
       value={typeof value === 'number' ? value : null}
       onChange={change}

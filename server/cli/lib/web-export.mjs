@@ -7,7 +7,7 @@ import { distDir, folder, root } from './paths.mjs';
 import { isOurs } from './processes.mjs';
 import { lastLines, runAside } from './run.mjs';
 
-const sources = ['app', 'components', 'shared', 'assets', 'app.json', 'babel.config.js', 'metro.config.js', 'package-lock.json'];
+const sources = ['app', 'components', 'shared', 'assets', 'metro', 'app.json', 'babel.config.js', 'metro.config.js', 'package-lock.json'];
 
 /**
  * Exports the web app to dist/ with its compressed forms, when the sources changed since the last time.

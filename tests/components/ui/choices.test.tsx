@@ -10,7 +10,7 @@ test('one of several: the chosen one is checked, "Not sure" is last and a choice
   const onChange = jest.fn();
   render(<ChoiceCards id="main" label="Main breaker" choices={ratings} value="200" onChange={onChange} unsure={unsure} />);
   const radios = screen.getAllByRole('radio');
-  expect(radios.map((radio) => radio.props['aria-label'] as string)).toEqual(['150 A', '200 A', 'Not sure']);
+  expect(radios.map((radio) => radio.props.accessibilityLabel as string)).toEqual(['150 A', '200 A', 'Not sure']);
   expect(screen.getByRole('radio', { name: '200 A', checked: true })).toBeOnTheScreen();
   fireEvent.press(screen.getByRole('radio', { name: 'Not sure' }));
   expect(onChange).toHaveBeenLastCalledWith('unsure');

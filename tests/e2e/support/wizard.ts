@@ -1,5 +1,8 @@
 import { expect, type Locator, type Page } from '@playwright/test';
 
+/** A card's name is its label and then its second line. */
+const startingWith = (label: string) => new RegExp(`^${label.replaceAll(' ', '\\s')}(?!\\w)`);
+
 /** What a person does on a step of the wizard, by what they read on it. */
 export function wizardOn(page: Page) {
   const group = (label: string): Locator => page.getByRole('radiogroup', { name: label, exact: true });
@@ -9,11 +12,16 @@ export function wizardOn(page: Page) {
       const list = page.getByRole('combobox', { name: label, exact: true });
       await expect(group(label).or(list)).toBeVisible();
       if (await list.isVisible()) await list.selectOption({ label: choice });
-      else await group(label).getByRole('radio', { name: choice }).check({ force: true });
+      else {
+        await group(label).getByText(choice, { exact: true }).click();
+        await expect(group(label).getByRole('radio', { name: startingWith(choice) })).toBeChecked();
+      }
     },
     /** Ticks one of several. */
     async tick(label: string, choice: string): Promise<void> {
-      await page.getByRole('group', { name: label, exact: true }).getByRole('checkbox', { name: choice }).check({ force: true });
+      const cards = page.getByRole('group', { name: label, exact: true });
+      await cards.getByText(choice, { exact: true }).click();
+      await expect(cards.getByRole('checkbox', { name: choice })).toBeChecked();
     },
     async type(label: string, number: string): Promise<void> {
       const box = page.getByRole('spinbutton', { name: label, exact: true });

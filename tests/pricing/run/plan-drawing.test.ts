@@ -10,7 +10,10 @@ describe('planDrawing', () => {
     const drawing = planDrawing(known, planRuns(known)[0] ?? null);
     expect(planDrawingSchema.parse(drawing)).toEqual(drawing);
     expect(drawing).toMatchObject({
-      panel: { wall: 'back', alongFt: 4, topIn: 60 }, houseDoor: { wall: 'left', alongFt: 12.5, widthFt: 3 }, run: { lengthFt: 32.25 }, cable: { reaches: true, usedFt: 10.4, shortFt: 0 },
+      panel: { wall: 'back', alongFt: 4, topIn: 60 },
+      houseDoor: { wall: 'left', alongFt: 12.5, widthFt: 3 },
+      run: { lengthFt: 32, wallFt: 25, upDownFt: 7 },
+      cable: { reaches: true, usedFt: 10.4, shortFt: 0 },
     });
   });
   it('leaves out a panel that is elsewhere, and a run that was not found', () => {

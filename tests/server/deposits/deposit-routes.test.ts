@@ -1,7 +1,10 @@
 import { randomUUID } from 'node:crypto';
 import type { AddressInfo, Server } from 'node:net';
+import { Op } from 'sequelize';
 import type { Deposit } from '../../../shared/api/quotes';
 import { createApp } from '../../../server/app';
+import { createCheckoutSession } from '../../../server/deposits/checkout-session';
+import { refundDeposit } from '../../../server/deposits/refund-deposit';
 import { createStripe } from '../../../server/payments/stripe';
 import { browserOf, startTestApp, testOrigin, type Agent, type TestApp } from '../../support/app';
 import { startFakeStripe, WEBHOOK_SECRET, type FakeStripeServer } from '../../support/fake-stripe';
@@ -157,6 +160,26 @@ describe('deposits', () => {
     const first = await checkoutUrl(job);
     await provider.stripe.checkout.sessions.expire(first.split('/pay/')[1] ?? '');
     expect(await checkoutUrl(job)).not.toBe(first);
+  });
+
+  it('are sent back once when two payment pages of one intake were paid', async () => {
+    const { intakeId, quoteId, option } = await storePricedIntake(app.deps);
+    for (const email of ['one@example.com', 'other@example.com']) {
+      const { id: depositId, amountCents } = await app.deps.models.Deposit.create({
+        intakeId, quoteId, optionId: option.id, contact: { ...contact, email }, consentWords: 'agreed', amountCents: option.depositCents,
+      });
+      const facts = { depositId, intakeId, amountCents, email, optionTitle: option.title, companyName: 'Demo', publicUrl: testOrigin };
+      await provider.pay((await createCheckoutSession(provider.stripe, facts)).url ?? '', GOOD);
+    }
+    const extra = () => app.deps.models.Deposit.findOne({ where: { intakeId, state: 'pending', paidAt: { [Op.not]: null } } });
+    await until(async () => (await extra()) !== null);
+    const { id } = (await extra()) ?? { id: '' };
+    await Promise.all([refundDeposit(app.deps, provider.stripe, id), refundDeposit(app.deps, provider.stripe, id).catch(() => undefined)]);
+    await until(async () => (await stateOf(intakeId)).includes('refunded'));
+    await refundDeposit(app.deps, provider.stripe, id);
+    expect(await stateOf(intakeId)).toEqual(['paid', 'refunded']);
+    const { data } = await provider.stripe.events.list({ type: 'charge.refunded', limit: 100 });
+    expect(data).toHaveLength(1);
   });
 
   it('say that nothing was taken while the provider is away, and go on afterwards', async () => {

@@ -36,7 +36,9 @@ it('one line a request with route, method and status, and nothing that people ty
   expect(requests).toContainEqual(expect.objectContaining({ method: 'PATCH', route: '/intakes/current/answers', status: 422, ms: expect.any(Number) as unknown }));
   expect(requests).toContainEqual(expect.objectContaining({ method: 'GET', route: 'unknown', status: 404 }));
   expect(requests).toContainEqual(expect.objectContaining({ method: 'GET', route: 'page', status: 404 }));
-  for (const [what, words] of Object.entries({ ...personal, token })) expect({ what, logged: server.log().includes(words) }).toEqual({ what, logged: false });
+  for (const [what, words] of Object.entries({ ...personal, token })) {
+    expect({ what, logged: server.log().includes(words) }).toEqual({ what, logged: false });
+  }
   expect(server.log()).not.toMatch(/tidyrun_(intake|desk|my)=|127\.0\.0\.1/);
   await server.stop();
 });

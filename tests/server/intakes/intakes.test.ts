@@ -90,7 +90,8 @@ describe('saving answers', () => {
     const browser = await start();
     const { zip, homeKind, tenure, parking } = completeAnswers;
     expect((await save(browser, { zip, homeKind, tenure, parking })).body).toHaveProperty('range.outcome', 'too-early');
-    const body = (await save(browser, completeAnswers).expect(200)).body as { range: { outcome: string; lowCents: number; highCents: number } };
+    const saved = await save(browser, completeAnswers).expect(200);
+    const body = saved.body as { range: { outcome: string; lowCents: number; highCents: number } };
     expect(body.range.outcome).toMatch(/range|firm/);
     expect(body.range.lowCents).toBeGreaterThan(0);
     expect(body.range.highCents).toBeGreaterThanOrEqual(body.range.lowCents);

@@ -121,7 +121,10 @@ describe('kept', () => {
 
   it('with a hint when another try is worth it', async () => {
     const browser = await start();
-    const verdictOf = async (picture: Sharp) => ((await send(browser, await picture.jpeg({ quality: 90 }).toBuffer())).body as Photo).verdict;
+    const verdictOf = async (picture: Sharp) => {
+      const { body } = await send(browser, await picture.jpeg({ quality: 90 }).toBuffer());
+      return (body as Photo).verdict;
+    };
     expect(await verdictOf(noise(1200, 900))).toBe('good');
     expect(await verdictOf(sharp(await noise(1200, 900).png().toBuffer()).linear(0.15, 0))).toBe('dark');
     expect(await verdictOf(sharp(await noise(1200, 900).png().toBuffer()).blur(12))).toBe('blurred');
