@@ -13,7 +13,10 @@ const [SMALL_APPLIANCE_CIRCUITS, LAUNDRY_CIRCUITS] = [2, 1];
 /** Room heaters when their number is not known; as typical-loads.ts counts them. */
 const USUAL_ROOM_HEATERS = 4;
 
-/** What the load calculation needs of a home, VA by typical ratings where no plate is known. At its supply's volts: NEC 2023 220.5(A), from memory. */
+/**
+ * What the load calculation needs of a home, VA by typical ratings where no plate is known, at its supply's volts.
+ * NEC 2023 220.5(A), from memory.
+ */
 export function dwellingLoads(known: KnownFacts, edition: CodeEdition): DwellingLoads {
   const { loads } = known;
   const va = (id: keyof typeof loads) => (loads[id].present ? typicalLoadVa(id, loads[id].amount, known.volts) : 0);

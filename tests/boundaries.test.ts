@@ -56,6 +56,13 @@ describe('who may import whom', () => {
     expect(reached.map(told)).toEqual([]);
   });
 
+  it('the desk is one piece that only its own addresses load, and only when they are opened', () => {
+    const apart = inRoom('app').filter(({ file }) => file?.startsWith('components/desk/'));
+    expect(apart.map(({ file }) => file).filter((file) => !/\/desk-(later|home)\.tsx$/.test(file ?? ''))).toEqual([]);
+    const loaded = inRoom('components').filter(({ file }) => file === 'components/desk/desk-pages.ts');
+    expect(loaded.map(({ from }) => from)).toEqual(['components/desk/desk-later.tsx']);
+  });
+
   it('a circle is seen when there is one, and types alone make none', () => {
     const edge = (from: string, file: string, typeOnly = false): Import => ({ from, file, words: file, typeOnly });
     expect(findCircles([edge('a', 'b'), edge('b', 'c'), edge('c', 'b')])).toEqual([['b', 'c', 'b']]);

@@ -1,1 +1,1 @@
-export { DeskLayout as default } from '../../components/desk/desk-layout';
+export { DeskLayout as default } from '../../components/desk/desk-later';

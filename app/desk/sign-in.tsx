@@ -1,1 +1,1 @@
-export { SignInScreen as default } from '../../components/desk/sign-in-screen';
+export { SignInScreen as default } from '../../components/desk/desk-later';

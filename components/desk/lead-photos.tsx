@@ -26,7 +26,7 @@ export function LeadPhotos({ photos, shown, onShow }: LeadPhotosProps) {
   return (
     <View style={{ gap: space[2] }}>
       <View style={styles.frame}>
-        <Image source={{ uri: large.url }} alt={name} resizeMode="contain" style={StyleSheet.absoluteFill} />
+        <Image source={{ uri: large.url }} role="img" aria-label={name} resizeMode="contain" style={StyleSheet.absoluteFill} />
         <View style={styles.plate}><Text variant="fine" weight={800}>{`Photo ${slot?.number ?? ''}`}</Text></View>
         <View role="link" href={large.url} hrefAttrs={{ target: 'blank', rel: 'noopener' }} aria-label={`Open ${name.toLowerCase()} in full size`} style={styles.full}>
           <Glyph of={Search} color="ink" />
@@ -52,7 +52,7 @@ function Thumb({ photo, picked, onPress }: { readonly photo: Photo; readonly pic
       role="button" aria-pressed={picked} aria-label={`Show photo ${slot?.number ?? ''}, ${slot?.name ?? photo.slot}`} onPress={onPress}
       style={[styles.thumb, picked && styles.picked]}
     >
-      <Image source={{ uri: photo.thumbUrl }} alt="" resizeMode="cover" style={styles.small} />
+      <Image source={{ uri: photo.thumbUrl }} resizeMode="cover" style={styles.small} />
       <Text variant="fine" weight={picked ? 800 : 600} color={picked ? 'ink' : 'ink2'} numberOfLines={1}>{`${slot?.number ?? ''}`}</Text>
     </Pressable>
   );

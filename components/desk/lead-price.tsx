@@ -3,7 +3,7 @@ import { View } from 'react-native';
 import type { Lead } from '../../shared/api/desk';
 import { dollarRange, dollars } from '../../shared/money';
 import type { QuoteDocument, QuoteOption } from '../../shared/quote';
-import { dayInWords } from '../price/dates';
+import { dayInWords } from '../../shared/dates';
 import { Tape } from '../price/tape';
 import { space } from '../theme/tokens';
 import { Select } from '../ui/select';

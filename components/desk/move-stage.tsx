@@ -21,7 +21,7 @@ export interface MoveStageProps {
   readonly reloading: boolean;
 }
 
-/** Moves the lead to a stage that is open from here. When somebody was faster it says so, keeps the choice, and offers the newest state. */
+/** Moves the lead to a stage that is open from here. When somebody was faster it says so, keeps the note, and offers the newest state. */
 export function MoveStage({ lead, csrfToken, onReload, reloading }: MoveStageProps) {
   const move = useMoveLead(lead.id, csrfToken);
   const [picked, setPicked] = useState<LeadStage | null>(null);
@@ -65,7 +65,7 @@ function Trouble({ error, onReload, reloading }: { readonly error: unknown; read
         level="note" title="Someone else changed this first"
         action={<Button label="Show the newest" busyLabel="Loading" kind="quiet" size="desk" busy={reloading} onPress={onReload} />}
       >
-        {`${failureWords(error)} Nothing was moved; your choice and note are kept.`}
+        {`${failureWords(error)} Nothing was moved; your note is kept.`}
       </CautionBox>
     );
   }

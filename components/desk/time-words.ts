@@ -1,4 +1,4 @@
-import { dayInWords, momentInWords } from '../price/dates';
+import { dayInWords, momentInWords } from '../../shared/dates';
 
 const MINUTE_MS = 60_000;
 const HOUR_MS = 3_600_000;

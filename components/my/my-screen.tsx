@@ -5,7 +5,7 @@ import type { My } from '../../shared/api/quotes';
 import { isProblem } from '../api/client';
 import { useMy } from '../api/use-my';
 import { GaragePlan } from '../plan/garage-plan';
-import { momentInWords } from '../price/dates';
+import { momentInWords } from '../../shared/dates';
 import { Failure } from '../price/failure';
 import { HowWeKnow } from '../price/how-we-know';
 import { PriceLines } from '../price/price-lines';

@@ -15,7 +15,7 @@ import { Page } from '../ui/page';
 import { Skeleton } from '../ui/skeleton';
 import { Text } from '../ui/text';
 import { ContactForm } from './contact-form-later';
-import { dayInWords } from './dates';
+import { dayInWords } from '../../shared/dates';
 import { Failure } from './failure';
 import { goTo } from './go-to';
 import { NoIntake } from './no-intake';

@@ -47,13 +47,10 @@ export function CheckScreen() {
 
 function StepAnswers({ step, answers }: { readonly step: Step; readonly answers: Answers }) {
   const items = visibleGroups(step, answers).flatMap((group) =>
-    visibleFields(group, answers).map((field) => ({
-      key: field.id,
-      title: field.name,
-      value: answers[field.id] === undefined ? (field.optional ? 'As usual' : 'Not answered') : field.words(answers[field.id]),
-      href: `/quote/${step.id}?part=${group.id}` as const,
-      linkLabel: `Change ${field.name}`,
-    })),
+    visibleFields(group, answers).map((field) => {
+      const value = answers[field.id] === undefined ? (field.optional ? 'As usual' : 'Not answered') : field.words(answers[field.id]);
+      return { key: field.id, title: field.name, value, href: `/quote/${step.id}?part=${group.id}` as const, linkLabel: `Change ${field.name}: ${value}` };
+    }),
   );
   if (items.length === 0) return null;
   return (

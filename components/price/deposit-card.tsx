@@ -7,7 +7,7 @@ import { ButtonLink } from '../ui/button-link';
 import { Card } from '../ui/card';
 import { Text } from '../ui/text';
 import { bookHref } from './book-href';
-import { dayInWords } from './dates';
+import { dayInWords } from '../../shared/dates';
 
 /** The deposit, its terms in a sentence, and the way to it. */
 export function DepositCard({ option, document }: { readonly option: QuoteOption; readonly document: QuoteDocument }) {

@@ -26,7 +26,7 @@ export function Narrowing({ narrowing }: { readonly narrowing: readonly Narrowin
       <Card>
         <Directory
           label="What would narrow the range"
-          items={worth.map((entry) => ({ key: entry.fact, title: entry.title, value: `about ${dollars(entry.cents)}`, href: narrowingHref(entry), linkLabel: `${entry.title}: would narrow the range by about ${dollars(entry.cents)}` }))}
+          items={worth.map((entry) => ({ key: entry.fact, title: entry.title, value: `about ${dollars(entry.cents)}`, href: narrowingHref(entry) }))}
         />
       </Card>
     </View>

@@ -6,7 +6,7 @@ import { space } from '../theme/tokens';
 import { Card } from '../ui/card';
 import { Plate } from '../ui/plate';
 import { Text } from '../ui/text';
-import { dayInWords } from './dates';
+import { dayInWords } from '../../shared/dates';
 import { Tape } from './tape';
 
 /** The range (or the one firm price) of the chosen option on its tape, against where the homeowner started. */

@@ -48,7 +48,7 @@ function Line({ item, n }: { item: DirectoryItem; n: number | null }) {
   const struck = item.tone === 'removed' ? ({ textDecorationLine: 'line-through' } as const) : null;
   const words = (
     <>
-      {n === null ? null : <View style={{ paddingTop: 1 }}><NumberBox n={n} /></View>}
+      {n === null ? null : <View aria-hidden style={{ paddingTop: 1 }}><NumberBox n={n} /></View>}
       <View style={styles.words}>
         <Text weight={700} style={struck}>{item.title}</Text>
         {item.note ? <Text variant="note" weight={500} color="ink2">{item.note}</Text> : null}

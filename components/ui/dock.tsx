@@ -47,7 +47,8 @@ export function Dock({ range = null, side, tape, line, back, next, above }: Dock
 const styles = StyleSheet.create({
   dock: {
     backgroundColor: colors.card, borderTopLeftRadius: radius.sheet, borderTopRightRadius: radius.sheet, borderTopWidth: border.hair,
-    borderColor: colors.rule, boxShadow: shadow.dock, paddingHorizontal: space[4], paddingTop: space[3], paddingBottom: space[4], zIndex: 10,
+    borderColor: colors.rule, boxShadow: shadow.dock, zIndex: 10,
+    paddingHorizontal: space[4], paddingTop: space[3], paddingBottom: space[4],
   },
   above: { position: 'absolute', left: 0, right: 0, bottom: '100%', height: 0 },
   inner: { flexDirection: 'row', flexWrap: 'wrap', width: '100%', maxWidth: 680, alignSelf: 'center', rowGap: space[2], columnGap: space[3] },

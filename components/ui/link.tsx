@@ -23,7 +23,7 @@ export function Link({ label, href, icon, variant = 'subheading', color = 'lake'
   return (
     <Anchor href={href} spokenLabel={spokenLabel} style={({ pressed }) => [styles.link, pressed && styles.pressed]}>
       {icon ? <Glyph of={icon} color={color} /> : null}
-      <Text variant={variant} color={color} weight={700}>{label}</Text>
+      <Text variant={variant} color={color} weight={700} style={styles.words}>{label}</Text>
     </Anchor>
   );
 }
@@ -47,7 +47,9 @@ export function RowLink({ label, href, icon, note }: RowLinkProps) {
 }
 
 const styles = StyleSheet.create({
-  link: { flexDirection: 'row', alignItems: 'center', gap: space[2], minHeight: targetPx, alignSelf: 'flex-start' },
+  link: { flexDirection: 'row', alignItems: 'center', gap: space[2], minHeight: targetPx, alignSelf: 'flex-start', maxWidth: '100%' },
+  // A long e-mail address breaks rather than leaving its card.
+  words: { flexShrink: 1, minWidth: 0 },
   pressed: { opacity: 0.7 },
   row: { flexDirection: 'row', alignItems: 'center', gap: space[3], minHeight: 60, paddingVertical: space[2], borderTopWidth: border.hair, borderColor: colors.rule },
 });

@@ -42,7 +42,7 @@ export function PhotoSlot({
   return (
     <View role="group" aria-label={`Photo ${number}: ${title}`} style={[styles.slot, wanted && empty && styles.wanted, state === 'poor' && styles.poor]}>
       <View style={[styles.frame, empty && !wanted && styles.dashed]}>
-        {thumbUrl ? <Image source={{ uri: thumbUrl }} alt={title} style={StyleSheet.absoluteFill} resizeMode="cover" /> : <PhotoGhost slot={slot} wanted={wanted} />}
+        {thumbUrl ? <Image source={{ uri: thumbUrl }} role="img" aria-label={title} style={StyleSheet.absoluteFill} resizeMode="cover" /> : <PhotoGhost slot={slot} wanted={wanted} />}
       </View>
       <View style={styles.name}>
         <NumberBox n={number} />

@@ -4,7 +4,7 @@ import { useState } from 'react';
 import { View } from 'react-native';
 import { failureWords, newIdempotencyKey, problemByField } from '../api/client';
 import { useFinishLater } from '../api/use-finish-later';
-import { dayInWords } from '../price/dates';
+import { dayInWords } from '../../shared/dates';
 import { space } from '../theme/tokens';
 import { Dialogue } from '../ui/dialogue';
 import { Field } from '../ui/field';
@@ -56,7 +56,10 @@ export function FinishLater({ label = 'Finish later', icon = Clock }: { readonly
         ) : (
           <View style={{ gap: space[3] }}>
             <Text color="ink2">Your answers are kept. We mail you a link that opens them on any device.</Text>
-            <Field id="later-email" label="E-mail" hint="For this link, nothing else." value={email} onChangeText={change} inputMode="email" autoComplete="email" error={wrong} onSubmit={() => void send()} />
+            <Field
+              id="later-email" label="E-mail" hint="For this link, nothing else." inputMode="email" autoComplete="email"
+              value={email} onChangeText={change} error={wrong} onSubmit={() => void send()}
+            />
             {later.error && !wrong ? <FieldError id="later">{failureWords(later.error)}</FieldError> : null}
           </View>
         )}

@@ -47,5 +47,8 @@ export function OutsideArea({ zip }: { zip: string }) {
 }
 
 const styles = StyleSheet.create({
-  card: { gap: space[3], padding: space[4], borderRadius: radius.card, borderWidth: border.hair, borderColor: colors.rule, backgroundColor: colors.card },
+  card: {
+    gap: space[3], padding: space[4], borderRadius: radius.card, borderWidth: border.hair, borderColor: colors.rule,
+    backgroundColor: colors.card,
+  },
 });

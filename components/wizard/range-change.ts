@@ -10,7 +10,8 @@ export const standOf = (range: LiveRange | undefined): RangeStand | null =>
     : null;
 
 /** How much narrower the range is than before, cents; below zero: wider. */
-export const narrowedBy = (before: RangeStand, now: RangeStand): number => before.highCents - before.lowCents - (now.highCents - now.lowCents);
+export const narrowedBy = (before: RangeStand, now: RangeStand): number =>
+  before.highCents - before.lowCents - (now.highCents - now.lowCents);
 
 /** "Narrowed by $570." or "Wider now, by $120."; null when the width is the same. */
 export function changeWords(before: RangeStand | null, now: RangeStand): string | null {
@@ -29,7 +30,9 @@ export function spokenChange(before: RangeStand | null, now: RangeStand): string
   return `${end} ${spokenRange(now.lowCents, now.highCents)}.${tail}`;
 }
 
-const pictured: Readonly<Record<string, string>> = { panel: 'the open panel', label: 'the panel label', wall: 'the charger wall', way: 'the way between', meter: 'the meter' };
+const pictured: Readonly<Record<string, string>> = {
+  panel: 'the open panel', label: 'the panel label', wall: 'the charger wall', way: 'the way between', meter: 'the meter',
+};
 
 /** What would narrow the range most: a question by its name; where photos are asked for, the picture that answers it. */
 function mostOf(narrowing: readonly Narrowing[], byPhoto: boolean): { words: string; cents: number } | null {
@@ -47,5 +50,6 @@ export function rangeLine(range: LiveRange, before: RangeStand | null, byPhoto =
   const did = changeWords(before, now);
   const most = mostOf(range.narrowing, byPhoto);
   if (!most) return did ?? '';
-  return did ? `${did} ${most.words} would take off about ${dollars(most.cents)} more.` : `${most.words} would narrow this by about ${dollars(most.cents)}.`;
+  if (did) return `${did} ${most.words} would take off about ${dollars(most.cents)} more.`;
+  return `${most.words} would narrow this by about ${dollars(most.cents)}.`;
 }

@@ -14,6 +14,7 @@ export const groupAt = (step: Step, answers: Answers, part: string | undefined):
 const stepAfter = (step: Step, by: 1 | -1): Step | null => steps.find((entry) => entry.number === step.number + by) ?? null;
 const lower = (text: string) => text.charAt(0).toLowerCase() + text.slice(1);
 
+export interface FieldProblem { readonly field: string; readonly detail: string }
 export interface Turn { readonly href: string; readonly label: string }
 
 /** Where Next leads and what it says. `byGroup`: one group a screen. */
@@ -43,7 +44,7 @@ export const detour = (step: Step, answers: Answers): Step | null => {
 };
 
 /** What keeps Next from going on: the group on screen first; on the last group, whatever else of the step is open. */
-export function problemsOnNext(step: Step, group: Group | null, answers: Answers, byGroup: boolean): readonly { field: string; detail: string }[] {
+export function problemsOnNext(step: Step, group: Group | null, answers: Answers, byGroup: boolean): readonly FieldProblem[] {
   if (!byGroup || !group) return stepProblems(step, answers);
   const here = stepProblems(step, answers, [group]);
   const last = visibleGroups(step, answers).at(-1)?.id === group.id;
@@ -51,4 +52,5 @@ export function problemsOnNext(step: Step, group: Group | null, answers: Answers
 }
 
 /** The group of a step in which a field is asked. */
-export const groupOfField = (step: Step, fieldId: string): Group | null => step.groups.find((group) => group.fields.some((field) => field.id === fieldId)) ?? null;
+export const groupOfField = (step: Step, fieldId: string): Group | null =>
+  step.groups.find((group) => group.fields.some((field) => field.id === fieldId)) ?? null;

@@ -3,7 +3,7 @@ import { useState } from 'react';
 import { stepProblems, visibleFields, visibleGroups, type Answers, type Group, type Step } from '../../shared/wizard/index';
 import { afterPress } from '../ui/after-press';
 import { fullBoard } from './full-board';
-import { backTurn, groupOfField, nextTurn, placeHref, problemsOnNext, type Turn } from './step-flow';
+import { backTurn, groupOfField, nextTurn, placeHref, problemsOnNext, type FieldProblem, type Turn } from './step-flow';
 import { useWizard } from './wizard-context';
 
 export interface StepState {
@@ -15,7 +15,7 @@ export interface StepState {
   /** True while Next waits for the server. */
   readonly busy: boolean;
   /** What Next found, as long as it is still so; the summary shows them. */
-  readonly problems: readonly { field: string; detail: string }[];
+  readonly problems: readonly FieldProblem[];
   /** Counts the times that Next was refused, so that the summary takes focus each time. */
   readonly refusals: number;
   /** Why Next could not go on although the answers are right. */
@@ -82,7 +82,7 @@ export function useStep(step: Step, group: Group | null, byGroup: boolean): Step
     groups: visibleGroups(step, answers),
     back: backTurn(step, group, answers, byGroup),
     refusals: tried.place === place ? tried.count : 0,
-    errorOf: (id) => wizard.refused[id] ?? problems.find((problem) => problem.field === id)?.detail ?? live.find((problem) => problem.field === id)?.detail ?? null,
+    errorOf: (id) => wizard.refused[id] ?? [...problems, ...live].find((problem) => problem.field === id)?.detail ?? null,
     leaveField: (id) => {
       afterPress(() => setLeft((before) => (before.has(id) ? before : new Set([...before, id]))));
       void wizard.flush();

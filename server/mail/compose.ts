@@ -7,7 +7,8 @@ import { timeZoneOfZip } from '../intakes/place';
 import { contactWaysInWords } from '../leads/contact-ways-in-words';
 import type { Mail } from '../models/mail';
 import { readQuote } from '../quotes/read-quote';
-import { dayInWords, isoDateIn } from '../words/dates';
+import { dayInWords } from '../../shared/dates';
+import { isoDateIn } from '../words/dates';
 import type { Sender } from './content';
 import type { MailTemplate } from './queue-mail';
 import type { Compose } from './send-mail';
@@ -36,7 +37,7 @@ async function resumeLink({ models, clock, env, pricing }: ComposeDeps, { intake
   return {
     to: intake.email,
     content: resumeLinkMail({
-      resumeUrl: `${env.PUBLIC_URL}/resume/${token}`, openUntil: dayInWords(isoDateIn(expiresAt, zone), isoDateIn(clock(), zone)),
+      resumeUrl: `${env.PUBLIC_URL}/resume/${token}`, openUntil: dayInWords(expiresAt, zone, clock()),
       nextStep: next.id === 'price' ? null : next.short,
     }),
   };
@@ -48,23 +49,22 @@ async function leadFacts({ sequelize, models, clock }: ComposeDeps, { leadId }: 
   if (!lead?.quoteId) return null;
   const { document } = await readQuote(sequelize, lead.quoteId);
   const zone = document.jurisdiction.timeZone;
-  const today = isoDateIn(clock(), zone);
-  const day = (at: Date) => dayInWords(isoDateIn(at, zone), today);
+  const day = (at: Date) => dayInWords(at, zone, clock());
   const deposit = lead.depositId === null ? null : await models.Deposit.findByPk(lead.depositId);
-  return { lead, document, zone, today, day, deposit, due: day(lead.dueAt ?? clock()) };
+  return { lead, document, zone, day, deposit, due: day(lead.dueAt ?? clock()) };
 }
 
 async function receipt(deps: ComposeDeps, mail: Mail): Promise<Composed> {
   const facts = await leadFacts(deps, mail);
   const option = facts?.document.options.find(({ id }) => id === facts.deposit?.optionId);
   if (!facts?.deposit?.paidAt || !option) return null;
-  const { lead, deposit, document, zone, today, day, due } = facts;
+  const { lead, deposit, document, zone, day, due } = facts;
   return {
     to: deposit.contact.email,
     content: receiptMail({
       name: lead.name, street: lead.street, town: lead.town, jobNumber: lead.jobNumber, amountCents: deposit.amountCents,
       paidOn: day(facts.deposit.paidAt), firstLookBy: due, option, cautions: document.cautions,
-      cancelUntil: dayInWords(cancellationDeadline(isoDateIn(facts.deposit.paidAt, zone)), today),
+      cancelUntil: dayInWords(cancellationDeadline(isoDateIn(facts.deposit.paidAt, zone)), zone, deps.clock()),
       myUrl: await myUrl(deps, lead.intakeId), sender: senderOf(deps),
     }),
   };

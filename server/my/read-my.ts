@@ -5,7 +5,7 @@ import { presentDeposit } from '../deposits/read-deposit';
 import type { Deps } from '../deps';
 import { problem } from '../http/problem';
 import { readQuote } from '../quotes/read-quote';
-import { dayInWords, isoDateIn } from '../words/dates';
+import { dayInWords } from '../../shared/dates';
 import { timeline } from './timeline';
 
 /**
@@ -18,7 +18,7 @@ export async function readMy({ sequelize, models, clock }: Deps, intakeId: strin
   const { document } = await readQuote(sequelize, lead.quoteId);
   const deposit = lead.depositId === null ? null : await models.Deposit.findByPk(lead.depositId);
   const zone = document.jurisdiction.timeZone;
-  const day = (at: Date) => dayInWords(isoDateIn(at, zone), isoDateIn(clock(), zone));
+  const day = (at: Date) => dayInWords(at, zone, clock());
   return {
     jobNumber: lead.jobNumber, name: lead.name, street: lead.street, town: lead.town, phone: company.phone,
     stage: lead.stage, quote: document, optionId: lead.optionId, deposit: deposit && await presentDeposit({ sequelize, models }, deposit),

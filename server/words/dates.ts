@@ -4,12 +4,6 @@ export function isoDateIn(at: Date, timeZone: string): string {
   return `${parts.year}-${parts.month}-${parts.day}`;
 }
 
-/** "Thu, May 14", and the year only when it is not that of `today`. Both are calendar dates such as "2026-05-14". */
-export function dayInWords(isoDate: string, today: string): string {
-  const year = isoDate.slice(0, 4) === today.slice(0, 4) ? undefined : ('numeric' as const);
-  return new Intl.DateTimeFormat('en-US', { timeZone: 'UTC', weekday: 'short', month: 'long', day: 'numeric', year }).format(new Date(`${isoDate}T12:00:00Z`));
-}
-
 /** The moment at which clocks of a time zone show `hour`:00 on a calendar date; the earlier one when that hour comes twice. */
 export function momentIn(isoDate: string, hour: number, timeZone: string): Date {
   const wanted = Date.parse(`${isoDate}T${String(hour).padStart(2, '0')}:00:00Z`);

@@ -1,10 +1,10 @@
 import type { Lead } from '../../shared/api/desk';
-import { addPhoto, newVisitor, payDeposit, signInByApi, startIntake } from './support/api';
+import { addPhoto, newPerson, newVisitor, payDeposit, signInByApi, startIntake } from './support/api';
 import { doubtfulHouse } from './support/homes';
 import { signInOf } from './support/product';
 import { expect, expectAccessible, listen, test } from './support/test';
 
-const person = { name: 'Bram Ashdown', email: 'bram.ashdown@example.com', street: '44 Demo Crescent', phone: '555-0171' };
+const person = newPerson('Bram', 'Ashdown');
 let jobNumber = 0;
 
 test.beforeAll(async ({ playwright }) => {
@@ -38,18 +38,18 @@ test('an estimator signs in, finds a lead, reads it, moves it on, and signs out'
 
   await test.step('the lead is found by search', async () => {
     await expectAccessible(page);
-    await page.getByRole('textbox', { name: /^Search leads/ }).fill('Ashdown');
-    const rows = page.getByRole('row').filter({ hasText: 'Bram Ashdown' });
+    await page.getByRole('searchbox', { name: /^Search leads/ }).fill(person.name);
+    const rows = page.getByRole('row').filter({ hasText: person.name });
     await expect(rows).toHaveCount(1);
     await expect(page.getByText('1 lead', { exact: true })).toBeVisible();
     await rows.getByRole('link').first().click();
   });
 
   await test.step('its page shows facts, photo, price lines, load calculation and history', async () => {
-    await expect(page.getByRole('heading', { level: 1 })).toContainText('Bram Ashdown');
+    await expect(page.getByRole('heading', { level: 1 })).toContainText(person.name);
     const main = page.getByRole('main');
     await expect(main).toContainText(String(jobNumber));
-    await expect(main).toContainText('44 Demo Crescent');
+    await expect(main).toContainText(person.street);
     await expect(page.getByRole('img', { name: /panel, door open/i }).first()).toBeVisible();
     await expect(main).toContainText('Main breaker');
     await expect(main).toContainText('220.83');
@@ -64,7 +64,7 @@ test('an estimator signs in, finds a lead, reads it, moves it on, and signs out'
     const second = await context.newPage();
     const complaints = listen(second);
     await second.goto(page.url());
-    await expect(second.getByRole('heading', { level: 1 })).toContainText('Bram Ashdown');
+    await expect(second.getByRole('heading', { level: 1 })).toContainText(person.name);
     await move(page, 'Waiting on photo');
     await expect(page.getByText('Moved to “Waiting on photo”.')).toBeVisible();
     await move(second, 'Needs a visit');

@@ -1,4 +1,4 @@
-import { addPhoto, lendTo, newVisitor, payDeposit, startIntake } from './support/api';
+import { addPhoto, lendTo, newPerson, newVisitor, payDeposit, startIntake } from './support/api';
 import { doubtfulHouse, rustyHouse } from './support/homes';
 import { linkIn, waitForMail } from './support/mailbox';
 import { product, signInOf } from './support/product';
@@ -29,9 +29,9 @@ for (const { width, height } of windows) {
           await startIntake(visitor, who === 'someone whose panel rusts' ? rustyHouse : doubtfulHouse);
           await addPhoto(visitor, 'panel');
           if (who === 'someone who has paid') {
-            const email = `looks-${width}@example.com`;
-            await payDeposit(visitor, { name: 'Juno Marsh', email, street: '9 Demo Lane' });
-            const token = new URL(linkIn(await waitForMail(email, /deposit is paid/), '/my/')).pathname.split('/').pop();
+            const person = newPerson('Juno', 'Marsh');
+            await payDeposit(visitor, person);
+            const token = new URL(linkIn(await waitForMail(person.email, /deposit is paid/), '/my/')).pathname.split('/').pop();
             await visitor.post('/api/my', { data: { token } });
           }
           await lendTo(page, visitor);
@@ -68,7 +68,7 @@ async function expectWellMade(page: Parameters<typeof expectAccessible>[0], addr
   const heading = page.getByRole('heading', { level: 1 });
   await expect(heading, address).toHaveCount(1);
   await expect(heading, address).toBeVisible();
-  await expect(page.getByRole('progressbar', { name: /^(Loading|Opening|Working)/ }), address).toHaveCount(0);
+  await expect(page.getByRole('status', { name: /^(Loading|Opening|Working)/ }), address).toHaveCount(0);
   await expect(page, address).toHaveTitle(/\S{2}.* – /);
   const overflow = await page.evaluate(() => document.documentElement.scrollWidth - document.documentElement.clientWidth);
   expect(overflow, `${address} is wider than its window`).toBeLessThanOrEqual(0);

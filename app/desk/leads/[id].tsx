@@ -1,1 +1,1 @@
-export { LeadScreen as default } from '../../../components/desk/lead-screen';
+export { LeadScreen as default } from '../../../components/desk/desk-later';

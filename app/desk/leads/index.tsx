@@ -1,1 +1,1 @@
-export { LeadsScreen as default } from '../../../components/desk/leads-screen';
+export { LeadsScreen as default } from '../../../components/desk/desk-later';

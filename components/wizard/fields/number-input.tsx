@@ -23,7 +23,7 @@ export function NumberInput({ field, error, onLeave }: FieldInputProps<NumberFie
       {...(field.hint ? { hint: field.hint } : {})}
       {...(field.optional ? { optional: true } : {})}
       {...(unsure
-        ? { unsure: { label: unsure.label, note: unsure.note, picked: value === UNSURE, onPick: (picked: boolean) => answer(id, picked ? UNSURE : null) } }
+        ? { unsure: { ...unsure, picked: value === UNSURE, onPick: (picked: boolean) => answer(id, picked ? UNSURE : null) } }
         : {})}
       value={typeof value === 'number' ? value : null}
       onChange={change}

@@ -4,7 +4,8 @@ import type { LiveRange } from '../../../shared/quote';
 const range = (change: Partial<LiveRange>): LiveRange => ({
   outcome: 'range', lowCents: 124_000, highCents: 278_000, optionTitle: null, narrowing: [], flags: [], load: null, plan: null, planProblems: [], ...change,
 });
-// Widths: $2,110 before, $1,540 now, so $570 narrower. Figures and wording from the design: voice, example strings 4 and 5; components, "The tape".
+// Widths: $2,110 before, $1,540 now, so $570 narrower.
+// Figures and wording from the design: voice, example strings 4 and 5; components, "The tape".
 const before = { lowCents: 112_000, highCents: 323_000 };
 const blanks = { fact: 'blankSpaces', title: 'Blank spaces', cents: 24_000, photo: null };
 

@@ -8,7 +8,8 @@ const step = (id: string): Step => {
 };
 const homeDone: Answers = { zip: '00017', homeKind: 'house', tenure: 'own', parking: 'driveway', yearBuilt: 'unsure', floorAreaFt2: 'unsure' };
 
-// Order and wording: product.md's seven steps; the design's phone and wide pictures ("Next: blank spaces", "Next: big loads", "Back: car", "See my price").
+// Order and wording: product.md's seven steps;
+// the design's phone and wide pictures ("Next: blank spaces", "Next: big loads", "Back: car", "See my price").
 describe('going on and back', () => {
   it('walks group by group on a phone and step by step on a wide screen', () => {
     const main = groupAt(step('panel'), homeDone, undefined);

@@ -18,6 +18,12 @@ let keys = 0;
 /** For what may happen once only. */
 export const newKey = (): string => `e2e-${process.pid}-${Date.now()}-${(keys += 1)}`;
 
+/** Someone whom no earlier test or run has met. */
+export const newPerson = (givenName: string, familyName: string): Person => {
+  const tag = `${Date.now().toString(36)}${(keys += 1)}`;
+  return { name: `${givenName} ${familyName} ${tag}`, email: `${familyName.toLowerCase()}.${tag}@example.com`, street: `${keys} Demo Lane` };
+};
+
 export async function expectOk(response: APIResponse): Promise<APIResponse> {
   expect(response.ok(), `${response.url()} says ${response.status()} ${response.ok() ? '' : await response.text()}`).toBe(true);
   return response;
