@@ -12,9 +12,11 @@ export function dollars(cents: Cents): string {
   return `${cents < 0 ? '−' : ''}$${text}`;
 }
 
-/** "$1,640 – $2,080"; one number when both ends are the same. */
-export const dollarRange = (lowCents: Cents, highCents: Cents): string =>
-  lowCents === highCents ? dollars(lowCents) : `${dollars(lowCents)}${NBSP}–${NBSP}${dollars(highCents)}`;
+/** "$1,640 – $2,080"; one number when both ends are the same; "up to $930" from nothing, which is never written as $0. */
+export function dollarRange(lowCents: Cents, highCents: Cents): string {
+  if (lowCents === highCents) return dollars(lowCents);
+  return lowCents === 0 ? `up to${NBSP}${dollars(highCents)}` : `${dollars(lowCents)}${NBSP}–${NBSP}${dollars(highCents)}`;
+}
 
 /** "1,640 to 2,080 dollars", for screen readers. */
 export const spokenRange = (lowCents: Cents, highCents: Cents): string => {

@@ -45,7 +45,7 @@ function MyJob({ my }: { readonly my: My }) {
     <View style={{ gap: space[5] }}>
       <View>
         <Text variant="note" weight={700} color="ink2">{`Job ${my.jobNumber} · ${my.street}, ${my.town}`}</Text>
-        <Text variant="title" level={1}>{my.stage}</Text>
+        <Text variant="title" level={1}>{headings[my.stage] ?? 'Your job'}</Text>
       </View>
       <View style={[styles.columns, wide && styles.wide]}>
         <View style={styles.column}>
@@ -97,6 +97,12 @@ function MyJob({ my }: { readonly my: My }) {
     </View>
   );
 }
+
+/** Where the job stands, as its homeowner reads it; by the desk's stages. */
+const headings: Readonly<Record<string, string>> = {
+  'check-photos': 'We’re checking your answers and photos', 'waiting-on-photo': 'We need one more photo', 'needs-a-visit': 'We’ll come and look',
+  'firm-price-sent': 'Your firm price is here', accepted: 'You accepted the firm price', booked: 'Your day is booked', closed: 'This job is closed',
+};
 
 const styles = StyleSheet.create({
   columns: { gap: space[5] },

@@ -49,7 +49,7 @@ function StepAnswers({ step, answers }: { readonly step: Step; readonly answers:
   const items = visibleGroups(step, answers).flatMap((group) =>
     visibleFields(group, answers).map((field) => {
       const value = answers[field.id] === undefined ? (field.optional ? 'As usual' : 'Not answered') : field.words(answers[field.id]);
-      return { key: field.id, title: field.name, value, href: `/quote/${step.id}?part=${group.id}` as const, linkLabel: `Change ${field.name}: ${value}` };
+      return { key: field.id, title: field.name, value, href: `/quote/${step.id}?part=${group.id}` as const };
     }),
   );
   if (items.length === 0) return null;

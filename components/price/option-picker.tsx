@@ -31,7 +31,7 @@ export function OptionPicker({ document, option, onChoose }: { readonly document
           id="option"
           label="Pick one to install"
           hideLabel
-          columns={wide ? 3 : 1}
+          columns={!wide ? 1 : document.options.length === 3 ? 3 : 2}
           layout={wide ? 'tall' : 'row'}
           value={option.id}
           onChange={onChoose}

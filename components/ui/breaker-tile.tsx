@@ -47,7 +47,7 @@ export function BreakerTile({ ref, tile, number, onPress, onMenu }: Props) {
       style={({ pressed }) => [styles.tile, state ? styles.on : styles.off, state === null && styles.unsure, pressed && styles.pressed]}
     >
       <View style={styles.line}>
-        <View style={[styles.number, { backgroundColor: state === true ? colors.spruce : colors.spruceDeep }]}>
+        <View dataSet={{ part: 'load-number' }} style={[styles.number, { backgroundColor: state === true ? colors.spruce : colors.spruceDeep }]}>
           <Text variant="fine" weight={800} color={state === true ? 'paper' : 'mist'}>{String(number)}</Text>
         </View>
         <View dataSet={{ part: 'load-glyph' }}><LoadGlyph id={tile.id} color={state === true ? 'copper' : 'mist'} /></View>

@@ -11,9 +11,8 @@ export interface DirectoryItem {
   readonly title: string;
   readonly note?: string;
   readonly value?: string;
-  /** Makes the whole line a link ("Change the main breaker"). */
+  /** Makes the whole line a link, named by its words. */
   readonly href?: Href;
-  readonly linkLabel?: string;
   /** changed: copper tint. removed: struck through. */
   readonly tone?: 'changed' | 'removed';
   /** More under the line: a reason, a disclosure. */
@@ -58,7 +57,7 @@ function Line({ item, n }: { item: DirectoryItem; n: number | null }) {
   );
   if (!item.href) return <View style={styles.line}>{words}</View>;
   return (
-    <Anchor href={item.href} spokenLabel={item.linkLabel} style={({ pressed }) => [styles.line, styles.target, pressed && styles.pressed]}>
+    <Anchor href={item.href} style={({ pressed }) => [styles.line, styles.target, pressed && styles.pressed]}>
       {words}
     </Anchor>
   );

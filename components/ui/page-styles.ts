@@ -18,7 +18,7 @@ export const pageStyles = [
   '[data-part="rail"][data-part]{position:sticky;top:0;height:100vh;height:100dvh;overflow-y:auto}',
   `@media (min-width:${breakpoints.tablet}px){[data-part="panel-drawing"][data-part]{height:236px;flex-basis:300px;flex-shrink:0}}`,
   // Under 360 px a tile of the board has no room for its glyph; the name says the same.
-  '@media (max-width:359px){[data-part="load-glyph"]{display:none!important}}',
+  '@media (max-width:359px){[data-part="load-glyph"],[data-part="load-number"]{display:none!important}}',
   // Where a toast stands on wide windows.
   '[data-part="corner"][data-part]{position:fixed;left:0;right:0;bottom:0;height:0;z-index:30}',
   // A field that gets the focus must not hide under the dock.

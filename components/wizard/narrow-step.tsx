@@ -51,7 +51,7 @@ export function NarrowStep({ state }: { state: StepState }) {
         <GroupIntro group={group} />
         {drawn && !phone ? (
           <View style={{ flexDirection: 'row', gap: space[5] }}>
-            <View style={{ flex: 1 }}><PlanPane /></View>
+            <View style={{ flex: 1 }}><PlanPane size="tablet" /></View>
             <View style={{ width: 260, gap: space[4] }}>{planFirst ? hint : null}<GroupFields group={group} state={state} compact /></View>
           </View>
         ) : <GroupFields group={group} state={state} />}

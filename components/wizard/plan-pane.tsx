@@ -10,15 +10,18 @@ import { Glyph } from '../ui/glyph';
 import { Text } from '../ui/text';
 import { useWizard } from './wizard-context';
 
+/** The most that the plan may take: on a phone the questions under it have to show. */
+const HEIGHT_PX = { phone: 310, tablet: 480, wide: 560 } as const;
+
 /** The measured plan as far as it is known, what is wrong on it, and how the cable reaches. */
-export function PlanPane({ wide = false }: { wide?: boolean }) {
+export function PlanPane({ size = 'phone' }: { size?: keyof typeof HEIGHT_PX }) {
   const { intake } = useWizard();
   const plan = intake?.range.plan;
   const problems = intake?.range.planProblems ?? [];
   if (!plan) return <EmptyState title="Your plan appears here" note="Type the width and the depth. We draw the garage and the run as you go." />;
   return (
     <View style={{ gap: space[3] }}>
-      <GaragePlan plan={plan} maxHeightPx={wide ? 560 : 310} legend={wide} />
+      <GaragePlan plan={plan} maxHeightPx={HEIGHT_PX[size]} legend={size === 'wide'} />
       {problems.map((words) => (
         <View key={words} style={{ flexDirection: 'row', gap: space[2] }}>
           <Glyph of={OctagonAlert} color="stop" />

@@ -39,7 +39,7 @@ export function PlanStep({ state }: { state: StepState }) {
         </>
       )}
     >
-      <PlanPane wide />
+      <PlanPane size="wide" />
     </WideFrame>
   );
 }

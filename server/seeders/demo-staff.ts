@@ -12,8 +12,10 @@ export const demoStaff = [
 
 export interface SeededStaff { readonly id: string; readonly name: string; readonly role: Role }
 
-/** Makes the demo's staff. @returns them, in the order of `demoStaff` */
+/** Makes the demo's staff, who may not sign in yet, or finds them. @returns them */
 export async function seedStaff(models: Models): Promise<readonly SeededStaff[]> {
+  const known = await models.Staff.findAll();
+  if (known.length > 0) return known;
   const passwordHash = await hashPassword(demoPassword);
-  return models.Staff.bulkCreate(demoStaff.map((person) => ({ ...person, passwordHash })));
+  return models.Staff.bulkCreate(demoStaff.map((person) => ({ ...person, passwordHash, active: false })));
 }

@@ -15,6 +15,7 @@ describe('money in words', () => {
   it('joins a range by an en dash that cannot break, and says it aloud', () => {
     expect(dollarRange(164_000, 208_000)).toBe('$1,640\u00a0–\u00a0$2,080');
     expect(dollarRange(195_000, 195_000)).toBe('$1,950');
+    expect(dollarRange(0, 93_000)).toBe('up to\u00a0$930');
     expect(spokenRange(164_000, 208_000)).toBe('1,640 to 2,080 dollars');
   });
   it('rounds to whole steps, halves away from zero', () => {
