@@ -189,7 +189,8 @@ const isTooEarly = ({ zip, homeKind, parking, chargerSupply }: Facts): boolean =
 export function liveRange({ facts, edition, samples = LIVE_SAMPLES }: Pick<IntakeToPrice, 'facts' | 'edition' | 'samples'>): LiveRange {
   const worked = workOut(facts, edition, samples);
   const entry = worked.options.find(({ recommended }) => recommended);
-  const home = entry ? worked.homeAt(worked.draws[entry.band.midSample] ?? MIDDLE) : null;
+  // Of the likely home: a home drawn near the middle of the range may have another main than most, and the gauge would jump about.
+  const home = entry ? worked.homeAt(MIDDLE) : null;
   const priced = entry && home ? priceOption(worked.compiled, home, entry.option) : null;
   const tooEarly = isTooEarly(facts) && worked.flags.length === 0;
   const shown = tooEarly ? undefined : entry;

@@ -83,7 +83,10 @@ export const quoteOptionSchema = range.extend({
     /** "6 AWG copper THHN in 3/4 in. EMT" */
     words: z.string(),
   }),
-  run: z.object({ method: z.string(), methodWords: z.string(), lengthFt: z.number(), wallFt: z.number(), upDownFt: z.number(), bends: z.number(), pullPoints: z.number(), supports: z.number() }),
+  run: z.object({
+    method: z.string(), methodWords: z.string(), lengthFt: z.number(), wallFt: z.number(), upDownFt: z.number(),
+    bends: z.number(), pullPoints: z.number(), supports: z.number(),
+  }),
   /** The pick list of the middle case. */
   takeoff: z.array(z.object({ item: z.string(), words: z.string(), quantity: z.number(), unit: z.string() })),
   laborHours: z.number(),

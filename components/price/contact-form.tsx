@@ -45,14 +45,12 @@ export function ContactForm({ submitLabel, busyLabel, busy, error, onSubmit, chi
   }, [error, setError]);
 
   const problems = order.flatMap((name) => (formState.errors[name]?.message ? [{ field: name, detail: String(formState.errors[name].message) }] : []));
-  const submit = handleSubmit(
-    (contact) => {
-      const details = JSON.stringify(contact);
-      if (last.current.details !== details) last.current = { details, key: newIdempotencyKey() };
-      onSubmit(contact, last.current.key);
-    },
-    () => setAttempt((count) => count + 1),
-  );
+  const send = (contact: Contact) => {
+    const details = JSON.stringify(contact);
+    if (last.current.details !== details) last.current = { details, key: newIdempotencyKey() };
+    onSubmit(contact, last.current.key);
+  };
+  const submit = () => void handleSubmit(send, () => setAttempt((count) => count + 1))();
 
   return (
     <View style={{ gap: space[5] }}>
@@ -78,7 +76,7 @@ export function ContactForm({ submitLabel, busyLabel, busy, error, onSubmit, chi
       />
       {children}
       {error && problems.length === 0 ? <View role="alert"><CautionBox level="stop">{failureWords(error)}</CautionBox></View> : null}
-      <Button label={submitLabel} busy={busy} busyLabel={busyLabel} onPress={() => void submit()} grow />
+      <Button label={submitLabel} busy={busy} busyLabel={busyLabel} onPress={submit} grow />
     </View>
   );
 }

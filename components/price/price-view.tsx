@@ -5,7 +5,6 @@ import { useBreakpoint } from '../theme/use-breakpoint';
 import { space } from '../theme/tokens';
 import { ButtonLink } from '../ui/button-link';
 import { Dock } from '../ui/dock';
-import { Link } from '../ui/link';
 import { Page } from '../ui/page';
 import { Text } from '../ui/text';
 import { bookHref } from './book-href';
@@ -33,7 +32,6 @@ export function PriceView({ document, option, onChoose }: PriceViewProps) {
       <PriceLines option={option} />
       <CouldMove document={document} option={option} />
       <Narrowing narrowing={document.narrowing} />
-      <Link label="Check your answers" href="/quote/check" />
       <HowWeKnow document={document} option={option} />
     </>
   );

@@ -28,7 +28,7 @@ export function LoadGauge({ serviceAmps, homeAmps, chargerAmps, status, known, t
   return (
     <View style={{ gap: space[1] }}>
       <View style={styles.line}>
-        <Text weight={700} style={{ flexShrink: 1 }}>{title ?? `Room on your ${ampsInWords(serviceAmps)} panel`}</Text>
+        <Text weight={700} style={{ flexShrink: 1 }}>{title ?? `Room on ${known ? 'your' : 'a likely'} ${ampsInWords(serviceAmps)} panel`}</Text>
         <StatusTag {...VERDICTS[status]} />
       </View>
       <View style={styles.line}>
@@ -55,7 +55,7 @@ export function LoadGauge({ serviceAmps, homeAmps, chargerAmps, status, known, t
         <Text variant="fine" color="ink2">{ampsInWords(serviceAmps / 2)}</Text>
         <Text variant="fine" color="ink2">{`${ampsInWords(serviceAmps)} main`}</Text>
       </View>
-      {known ? null : <Text variant="note" color="ink2">A typical home until the big loads are answered.</Text>}
+      {known ? null : <Text variant="note" color="ink2">A typical home where an answer is missing.</Text>}
     </View>
   );
 }

@@ -88,7 +88,8 @@ export async function seedIntake(seeding: Seeding, plan: DemoIntake, name: strin
       intakeId: intake.id, quoteId: quote.id, optionId: option.id, amountCents: option.depositCents, state: 'paid', contact, consentWords, createdAt: paidAt, paidAt,
     }, { transaction });
     await models.Intake.update({ stage: option ? 'paid' : 'visit-asked', updatedAt: paidAt }, { where: { id: intake.id }, transaction });
-    const lead = await createLead(seeding.deps, transaction, { intakeId: intake.id, quoteId: quote.id, document: quote.document, option, depositId: deposit?.id ?? null, contact, consentWords, consentAt: paidAt }, paidAt);
+    const given = { contact, consentWords, consentAt: paidAt, depositId: deposit?.id ?? null };
+    const lead = await createLead(seeding.deps, transaction, { intakeId: intake.id, quoteId: quote.id, document: quote.document, option, ...given }, paidAt);
     const person = random.pick(staff as [SeededStaff, ...SeededStaff[]]);
     await models.History.create({ leadId: lead.id, intakeId: intake.id, at: paidAt, who: option ? 'Payment provider' : 'Homeowner', what: option ? 'Deposit paid' : 'Asked for a visit', after: option ? `${dollars(option.depositCents)} for ${option.title}` : null }, { transaction });
     const firm = ['firm-price-sent', 'accepted', 'booked', 'closed'].includes(stage) && option ? option.midCents : lead.firmCents;

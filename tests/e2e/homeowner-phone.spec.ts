@@ -198,7 +198,7 @@ test.describe('a homeowner on a phone', () => {
       expect(addUp(amounts)).toEqual(readAmount(await heading.innerText()));
       await page.getByRole('button', { name: /^Why: / }).first().click();
       await expectAccessible(page);
-      await page.getByRole('link', { name: 'Check your answers' }).first().click();
+      await page.getByRole('link', { name: 'Check or change your answers' }).click();
       await wizard.see('Check your answers');
       await expect(page.getByRole('link', { name: /Main breaker\s*Not sure/ })).toBeVisible();
       await expectAccessible(page);
