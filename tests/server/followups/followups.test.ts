@@ -52,7 +52,7 @@ describe('followups', () => {
       const { to, words, content } = await mailOf(intakeId, 'resume-link');
       expect(to).toBe('ione@example.com');
       expect(content.title).toBe('Your answers are kept');
-      expect(words).toContain('The link works through Thu, December 31.');
+      expect(words).toContain('The link works through Thu, Dec 31.');
       const other = app.browser();
       const { body } = await other.post('/api/resume').send({ token: linkIn(words, 'resume') }).expect(200);
       expect(body).toMatchObject({ answers: homeAnswers, savedTo: 'i•••@example.com' });
@@ -79,7 +79,7 @@ describe('followups', () => {
       const { to, words } = await mailOf(intakeId, 'visit-asked');
       expect(to).toBe(contact.email);
       expect(words).toContain('Leave the panel alone and call 555-0142');
-      expect(words).toContain('By Thu, December 3, 5 p.m., we get in touch by e-mail or by phone');
+      expect(words).toContain('By Thu, Dec 3, 5 p.m., we get in touch by e-mail or by phone');
       const desk = await mailOf(intakeId, 'new-lead');
       expect(desk.to).toBe('office@example.com');
       expect(desk.words).toContain(`${testOrigin}/desk/leads/${lead.id}`);

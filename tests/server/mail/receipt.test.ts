@@ -23,14 +23,14 @@ describe('the receipt', () => {
 
     expect(composed?.to).toBe(contact.email);
     expect(composed?.content.subject).toMatch(/^Your \$150 deposit is paid: job 1\d{3}$/);
-    expect(words).toContain('Deposit: $150, paid Tue, December 1');
+    expect(words).toContain('Deposit: $150, paid Tue, Dec 1');
     expect(words).toContain(`${option.title}. ${option.subtitle}.`);
     expect(words).toContain(dollarRange(option.lowCents, option.highCents));
     for (const line of option.lines) expect(words).toContain(`${line.title}: ${line.lowCents === 0 && line.highCents === 0 ? 'Included' : dollarRange(line.lowCents, line.highCents)}`);
     for (const caution of document.cautions) expect(words).toContain(caution);
-    expect(words).toContain('By Thu, December 3, 5 p.m.');
+    expect(words).toContain('By Thu, Dec 3, 5 p.m.');
     // 16 CFR 429.1(a): midnight of the third business day after Tuesday, December 1, 2026 is that of Friday, December 4.
-    expect(words).toContain('until midnight of Fri, December 4, the third business day after you paid');
+    expect(words).toContain('until midnight of Fri, Dec 4, the third business day after you paid');
     expect(words).toContain('reply to this mail or call 555-0142');
     expect(words).toContain('invented');
     // The voice guide's list of words never used.
