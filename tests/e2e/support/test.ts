@@ -31,6 +31,8 @@ export function listen(page: Page, into: Complaints = { errors: [], strangers: [
 
 /** Runs axe over the page as it stands: no violation of any rule, best practices among them. The test goes on, so that one run tells of all. */
 export async function expectAccessible(page: Page): Promise<void> {
+  // A page is there when its heading is; before that axe would judge an empty one.
+  await page.getByRole('heading', { level: 1 }).first().waitFor();
   // Through the debugger, because the page's security policy rightly refuses a script element.
   await page.evaluate(axeSource);
   const found = await page.evaluate(async () => {
