@@ -27,6 +27,8 @@ export function wizardOn(page: Page) {
       const box = page.getByRole('spinbutton', { name: label, exact: true });
       await box.fill(number);
       await box.press('Tab');
+      // Nobody types faster than a button ignores a second tap for (400 ms).
+      await page.waitForTimeout(500);
     },
     /** Turns a tile of the board on. */
     async turnOn(load: string): Promise<void> {
