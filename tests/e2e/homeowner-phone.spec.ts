@@ -106,6 +106,8 @@ test.describe('a homeowner on a phone', () => {
       await inTab.pick('Is it in the wall or on it?', 'A box on the wall');
       await inTab.next('Next: power lines');
       await expect(tab.getByRole('radiogroup', { name: 'The power lines come' })).toBeVisible();
+      // The first tab reads what is kept by then; on a busy machine that is a moment later.
+      await expect.poll(async () => ((await (await page.request.get('/api/intakes/current')).json()) as { answers: Record<string, unknown> }).answers.panelMount).toBe('surface');
       await tab.close();
       // Without a screen no tab is ever hidden; the browser's word on coming back has to be given for it.
       await page.evaluate(() => { document.dispatchEvent(new Event('visibilitychange', { bubbles: true })); });
