@@ -1,3 +1,4 @@
+import type { Page } from '@playwright/test';
 import type { Lead } from '../../shared/api/desk';
 import { addPhoto, newPerson, newVisitor, payDeposit, signInByApi, startIntake } from './support/api';
 import { doubtfulHouse } from './support/homes';
@@ -14,7 +15,7 @@ test.beforeAll(async ({ playwright }) => {
   jobNumber = await payDeposit(visitor, person);
 });
 
-async function signIn(page: import('@playwright/test').Page, role: string, password?: string): Promise<void> {
+async function signIn(page: Page, role: string, password?: string): Promise<void> {
   const account = signInOf(role);
   await page.getByRole('textbox', { name: 'E-mail' }).fill(account.email);
   await page.getByRole('textbox', { name: 'Password' }).fill(password ?? account.password);
@@ -109,7 +110,7 @@ test('a stranger learns nothing of leads', async ({ request }) => {
 });
 
 /** Moves the lead that is open by the controls of its page. */
-async function move(page: import('@playwright/test').Page, stage: string): Promise<void> {
+async function move(page: Page, stage: string): Promise<void> {
   await page.getByRole('combobox', { name: 'Move to' }).selectOption({ label: stage });
   await page.getByRole('button', { name: `Move to “${stage}”` }).click();
 }

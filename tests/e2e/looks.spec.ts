@@ -1,3 +1,4 @@
+import type { Page, TestInfo } from '@playwright/test';
 import { addPhoto, lendTo, newPerson, newVisitor, payDeposit, startIntake } from './support/api';
 import { doubtfulHouse, rustyHouse } from './support/homes';
 import { linkIn, waitForMail } from './support/mailbox';
@@ -39,7 +40,7 @@ for (const { width, height } of windows) {
         for (const address of addresses) {
           await page.goto(address);
           await expectWellMade(page, address);
-          await page.screenshot({ path: info.outputPath(`${who} ${address.replaceAll(/\W+/g, '-')}.png`), fullPage: true });
+          await picture(page, info, `${who} ${address}`);
         }
       });
     }
@@ -53,18 +54,23 @@ for (const { width, height } of windows) {
       await page.getByRole('button', { name: 'Sign in' }).click();
       await expect(page.getByRole('heading', { level: 1, name: 'Leads' })).toBeVisible();
       await expectWellMade(page, '/desk/leads');
-      await page.screenshot({ path: info.outputPath('desk-leads.png'), fullPage: true });
+      await picture(page, info, 'desk leads');
       const { leads } = await (await page.request.get('/api/leads', { params: { limit: 1, sort: 'newest' } })).json();
       await page.goto(`/desk/leads/${leads[0].id}`);
       await expect(page.getByRole('heading', { level: 1 })).toContainText(leads[0].name);
       await expectWellMade(page, '/desk/leads/[id]');
-      await page.screenshot({ path: info.outputPath('desk-lead.png'), fullPage: true });
+      await picture(page, info, 'desk lead');
     });
   });
 }
 
+/** With E2E_PICTURES=1 every page is kept as a picture under test-results/, to be looked at. */
+async function picture(page: Page, info: TestInfo, name: string): Promise<void> {
+  if (process.env.E2E_PICTURES === '1') await page.screenshot({ path: info.outputPath(`${name.replaceAll(/\W+/g, '-')}.png`), fullPage: true });
+}
+
 /** One heading with the focus ready for it, a title, nothing wider than the window, no violation of axe's rules. */
-async function expectWellMade(page: Parameters<typeof expectAccessible>[0], address: string): Promise<void> {
+async function expectWellMade(page: Page, address: string): Promise<void> {
   const heading = page.getByRole('heading', { level: 1 });
   await expect(heading, address).toHaveCount(1);
   await expect(heading, address).toBeVisible();

@@ -11,13 +11,14 @@ const real = new Set(['DATABASE_URL', 'SMTP_URL', 'STRIPE_SECRET_KEY', 'STRIPE_W
 export default async function startProduct() {
   const dataDir = mkdtempSync(join(tmpdir(), 'tidyrun-e2e-'));
   const env = Object.fromEntries(Object.entries(process.env).filter(([name]) => !real.has(name)));
-  env.RATE_LIMIT_FACTOR = '1000'; // all tests come from one address
   // All the tests' visitors come from one address.
-  const product = createProduct({ dataDir, throwAway: true, env: { ...env, NODE_ENV: 'production', RATE_LIMIT_FACTOR: '100' } });
+  const product = createProduct({ dataDir, throwAway: true, env: { ...env, NODE_ENV: 'production', RATE_LIMIT_FACTOR: '1000' } });
   const stop = async () => {
     await product.stop();
     rmSync(dataDir, { recursive: true, force: true });
   };
+  // Ended from outside, the runner leaves without its teardown.
+  process.once('SIGTERM', () => void stop().finally(() => process.exit(143)));
   try {
     const started = await Promise.race([product.start(countSteps(productSteps)), product.failed]);
     Object.assign(process.env, {
