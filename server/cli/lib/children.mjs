@@ -74,8 +74,11 @@ export async function waitForAnswer(url, child) {
       const response = await fetch(url, { signal: AbortSignal.timeout(2_000) });
       await response.arrayBuffer();
       if (response.ok) return;
-    } catch {
-      // Not listening yet.
+    } catch (error) {
+      if (error instanceof Error && error.cause instanceof Error && error.cause.message === 'bad port') {
+        throw new Advice(`Browsers refuse to open port ${new URL(url).port} (it is on the Fetch standard's list of bad ports). Set PORT to another.`);
+      }
+      // Otherwise it is not listening yet.
     }
     await wait(100);
   }
